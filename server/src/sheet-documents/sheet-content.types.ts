@@ -96,15 +96,15 @@ export class SheetRange {
 export class RecommendedValues {
   @Field(() => Float, { description: 'Pa, the same for all rows' })
   readonly pressure: number;
-  @Field(() => [Float], { description: 'K' })
+  @Field(() => Float64Array, { description: 'K' })
   readonly temperatures: number[];
-  @Field(() => [Float], { description: 'm²/s' })
+  @Field(() => Float64Array, { description: 'm²/s' })
   readonly diffusivities: number[];
-  @Field(() => [Float], { description: 'm²/s' })
+  @Field(() => Float64Array, { description: 'm²/s' })
   readonly standardUncertainties: number[];
-  @Field(() => [Float], { description: 'm²/s, of the recommended value, level of confidence approximately 95 %' })
+  @Field(() => Float64Array, { description: 'm²/s, of the recommended value, level of confidence approximately 95 %' })
   readonly expandedUncertainties: number[];
-  @Field(() => [Float], {
+  @Field(() => Float64Array, {
     nullable: true,
     description: 'm²/s, half-width of the interval for one new laboratory; null without a between-series deviation.',
   })
@@ -186,9 +186,9 @@ export class SheetExcludedPoint {
 export class SheetEstimate {
   @Field()
   readonly method: string;
-  @Field(() => [Float], { description: 'm²/s, at `SheetEstimates.temperatures`' })
+  @Field(() => Float64Array, { description: 'm²/s, at `SheetEstimates.temperatures`' })
   readonly diffusivities: number[];
-  @Field(() => [Float], { description: 'Against the correlation, percent' })
+  @Field(() => Float64Array, { description: 'Against the correlation, percent' })
   readonly deviations: number[];
   @Field(() => Float, { nullable: true, description: 'Usual mean error of the method, percent, from its source' })
   readonly usualMeanError: number | null;
@@ -198,7 +198,7 @@ export class SheetEstimate {
 
 @ObjectType({ description: 'Estimates by kinetic theory and its relatives beside the recommended values' })
 export class SheetEstimates {
-  @Field(() => [Float], { description: 'K' })
+  @Field(() => Float64Array, { description: 'K' })
   readonly temperatures: number[];
   @Field(() => Float, { description: 'Pa' })
   readonly pressure: number;

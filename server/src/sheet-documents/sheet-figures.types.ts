@@ -7,7 +7,7 @@ export class FigureAxis {
   readonly minimum: number;
   @Field(() => Float)
   readonly maximum: number;
-  @Field(() => [Float])
+  @Field(() => Float64Array)
   readonly ticks: number[];
 }
 
@@ -16,13 +16,13 @@ export class FigureAxis {
     'The correlation along the temperature axis at the reference pressure. Columns of equal length; the curve runs beyond the validity range, where it is drawn broken and without band.',
 })
 export class FigureCurve {
-  @Field(() => [Float], { description: 'K' })
+  @Field(() => Float64Array, { description: 'K' })
   readonly temperatures: number[];
-  @Field(() => [Float], { description: 'm²/s' })
+  @Field(() => Float64Array, { description: 'm²/s' })
   readonly diffusivities: number[];
-  @Field(() => [Float], { description: 'U of the recommended value as a part of D: the band is D·exp(±value)' })
+  @Field(() => Float64Array, { description: 'U of the recommended value as a part of D: the band is D·exp(±value)' })
   readonly relativeExpandedUncertainties: number[];
-  @Field(() => [Float], {
+  @Field(() => Float64Array, {
     nullable: true,
     description: 'The interval for one new laboratory in the same way; null without a between-series deviation.',
   })
@@ -43,13 +43,13 @@ export class FigureSeries {
   readonly title: string;
   @Field({ description: 'The series as a whole carried weight' })
   readonly used: boolean;
-  @Field(() => [Float], { description: 'K' })
+  @Field(() => Float64Array, { description: 'K' })
   readonly temperatures: number[];
-  @Field(() => [Float], { description: 'D P/P0, m²/s' })
+  @Field(() => Float64Array, { description: 'D P/P0, m²/s' })
   readonly reducedDiffusivities: number[];
-  @Field(() => [Float], { description: 'u(D)/D, point to point; 0 where none is known' })
+  @Field(() => Float64Array, { description: 'u(D)/D, point to point; 0 where none is known' })
   readonly relativeUncertainties: number[];
-  @Field(() => [Float], { description: '100 (D/D(fit) − 1) at the T and P of the point' })
+  @Field(() => Float64Array, { description: '100 (D/D(fit) − 1) at the T and P of the point' })
   readonly deviations: number[];
   @Field(() => [Int], { description: 'Indices of the points that carried no weight' })
   readonly leftOut: number[];
@@ -59,9 +59,9 @@ export class FigureSeries {
 export class FigureEstimate {
   @Field()
   readonly method: string;
-  @Field(() => [Float], { description: 'K' })
+  @Field(() => Float64Array, { description: 'K' })
   readonly temperatures: number[];
-  @Field(() => [Float], { description: '100 (D/D(fit) − 1)' })
+  @Field(() => Float64Array, { description: '100 (D/D(fit) − 1)' })
   readonly deviations: number[];
 }
 
