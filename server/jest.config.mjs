@@ -9,4 +9,6 @@ export default {
   },
   testTimeout: 30_000,
   maxWorkers: 2,
+  globalSetup: '<rootDir>/test/global-setup.mjs',
+  globalTeardown: '<rootDir>/test/global-teardown.mjs',
 };
