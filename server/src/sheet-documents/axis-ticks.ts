@@ -43,7 +43,7 @@ function decadesOf(mantissas: readonly number[], minimum: number, maximum: numbe
 export const temperatureAxis = (minimum: number, maximum: number): FigureAxis => ({
   minimum,
   maximum,
-  ticks: multiplesOf(roundStep(maximum - minimum, 9), minimum, maximum),
+  ticks: multiplesOf(roundStep(maximum - minimum, 10), minimum, maximum),
 });
 
 /** An axis from −limit to limit or a little beyond, with figures at rounded steps. */

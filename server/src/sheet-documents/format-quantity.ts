@@ -1,19 +1,21 @@
+import { fromSi, unitOf } from '../units/units.js';
+
 const NO_BREAK_SPACE = '\u00a0';
 const THIN_SPACE = '\u2009';
 const MINUS = '\u2212';
 
-/** Units of the printed sheet, exact: cm² = 1e-4 m², kPa = 1e3 Pa (SI Brochure, 9th ed., BIPM 2019, table 7). */
+/** Units of the printed sheet, whatever units its reader prefers on the page. */
 export const PRINTED_UNITS = {
-  temperature: { label: 'K', perSi: 1 },
-  pressure: { label: 'kPa', perSi: 1e-3 },
-  diffusivity: { label: 'cm²/s', perSi: 1e4 },
-  molarMass: { label: 'g/mol', perSi: 1e3 },
+  temperature: unitOf('K'),
+  celsius: unitOf('°C'),
+  pressure: unitOf('kPa'),
+  diffusivity: unitOf('cm²/s'),
 } as const;
 export type PrintedQuantity = keyof typeof PRINTED_UNITS;
 
-/** An SI value in the unit of the printed sheet, without the dirt of the last binary digits. */
+/** An SI value in the unit of the printed sheet. */
 export const inPrintedUnit = (quantity: PrintedQuantity, value: number): number =>
-  Number((value * PRINTED_UNITS[quantity].perSi).toPrecision(14));
+  fromSi(value, PRINTED_UNITS[quantity]);
 
 /** Decimal places that show `uncertainty` to two significant digits (GUM, JCGM 100:2008, 7.2.6); 0 where both stand before the point. */
 export function placesFor(uncertainty: number): number {
@@ -63,7 +65,7 @@ export const withUnit = (value: string, unit: string): string =>
 
 /** An SI value in the unit of the printed sheet, with the unit. */
 export const formatQuantity = (quantity: PrintedQuantity, value: number): string =>
-  withUnit(formatShort(inPrintedUnit(quantity, value), 8), PRINTED_UNITS[quantity].label);
+  withUnit(formatShort(inPrintedUnit(quantity, value), 8), PRINTED_UNITS[quantity].symbol);
 
 /** `283.15 K to 448.15 K` */
 export const formatExtent = (quantity: PrintedQuantity, minimum: number, maximum: number): string =>

@@ -190,8 +190,8 @@ export class SheetEstimate {
   readonly diffusivities: number[];
   @Field(() => Float64Array, { description: 'Against the correlation, percent' })
   readonly deviations: number[];
-  @Field(() => Float, { nullable: true, description: 'Usual mean error of the method, percent, from its source' })
-  readonly usualMeanError: number | null;
+  @Field(() => Float, { description: 'Usual mean error of the method, percent, from its source' })
+  readonly usualMeanError: number;
   @Field({ description: 'Where the method and its usual error come from' })
   readonly source: string;
 }
@@ -202,7 +202,9 @@ export class SheetEstimates {
   readonly temperatures: number[];
   @Field(() => Float, { description: 'Pa' })
   readonly pressure: number;
-  @Field(() => [SheetEstimate], { description: 'Empty where a constant of a substance is missing' })
+  @Field(() => [SheetEstimate], {
+    description: 'Empty where a constant of a substance is missing or no method reaches the temperatures',
+  })
   readonly methods: SheetEstimate[];
   @Field(() => [TextRun])
   readonly note: TextRun[];

@@ -1,10 +1,8 @@
+import type { Estimate } from '../numerics/estimates/estimates.js';
 import type { EvaluableCorrelation, FitRecipe } from '../numerics/fitting/fit.types.js';
 
 export type VersionStatusName =
   'DRAFT' | 'IN_REVIEW' | 'RETURNED' | 'APPROVED' | 'RELEASED' | 'SUPERSEDED' | 'WITHDRAWN';
-
-/** What a substance can do to people; each has its sentence in sheet-strings.ts. */
-export type SubstanceCaution = 'FLAMMABLE' | 'TOXIC' | 'CORROSIVE' | 'OXIDISING' | 'ASPHYXIANT' | 'PEROXIDES';
 
 export interface SubstanceFacts {
   readonly name: string;
@@ -12,7 +10,8 @@ export interface SubstanceFacts {
   readonly casNumber: string | null;
   /** kg/mol */
   readonly molarMass: number;
-  readonly cautions: readonly SubstanceCaution[];
+  /** Whole sentences */
+  readonly cautions: readonly string[];
 }
 
 /** Points of a series as columns of equal length, SI; null where the source states nothing. */
@@ -72,15 +71,8 @@ export interface FitFacts {
   };
 }
 
-/** A method of estimation with the constants of both substances in it. */
-export interface EstimateFacts {
-  readonly method: string;
-  /** Percent, from `source`; null where none is published */
-  readonly usualMeanError: number | null;
-  readonly source: string;
-  /** D, m²/s, at T (K) and P (Pa) */
-  readonly diffusivity: (temperature: number, pressure: number) => number;
-}
+/** The estimates of the pair at one state; fewer where a method does not reach it. */
+export type EstimatesAt = (state: { readonly temperature: number; readonly pressure: number }) => readonly Estimate[];
 
 /** How the version stands today. */
 export interface StandingFacts {
@@ -116,7 +108,7 @@ export interface SheetFacts {
   readonly fit: FitFacts;
   /** Those used and those left out, in the order of their ordinals */
   readonly series: readonly SeriesFacts[];
-  readonly estimates: readonly EstimateFacts[];
+  readonly estimates: EstimatesAt;
   readonly words: {
     readonly summary: string;
     readonly changeNote: string | null;

@@ -112,7 +112,8 @@ export const sheetStrings = {
 
   estimatesNote:
     'Shown for comparison; no estimate took part in the fit. Usual mean error: from the source of each method.',
-  noEstimates: 'No estimate is shown: a constant that the methods need is missing for one of the substances.',
+  noEstimates:
+    'No estimate is shown: a constant that the methods need is missing, or they do not reach these temperatures.',
 
   expanded:
     '*u* is standard uncertainty. *U* is the expanded uncertainty of the recommended value, *U* = *k u* with *k* = {k}, level of confidence approximately 95 %{basis}.',
@@ -134,20 +135,14 @@ export const sheetStrings = {
       'Below {minimum} and above {maximum} the correlation extrapolates; the stated uncertainty no longer holds. Do not extrapolate a fitted exponent.',
     density:
       'It holds for the dilute gas, {pressure}. At higher pressure, and near saturation of a vapour, *D P* is not constant.',
-    FLAMMABLE:
-      '{substance} is flammable: ventilate, keep ignition sources away, and stay well below the lower flammable limit.',
-    TOXIC: '{substance} is toxic: work under a hood, keep to the exposure limits that hold where you are.',
-    CORROSIVE: '{substance} is corrosive: choose materials, gloves and eye protection tested for it.',
-    OXIDISING: '{substance} feeds fire: keep away from anything that burns.',
-    ASPHYXIANT: '{substance} displaces air in closed rooms: ventilate and watch the oxygen content.',
-    PEROXIDES: '{substance} forms peroxides in air: date it, test it, do not evaporate it to dryness.',
     ventilation:
       'Gases and vapours can burn, poison or displace air: ventilate, vent sweep gas to a hood or absorber, and read the supplier’s safety data sheet.',
     design:
       'Do not use this sheet as the sole basis of a safety-critical design. Local codes and licensed practice come first.',
   },
 
-  citation: '{publisher} ({year}). *{title}: mutual diffusivity*, data sheet {code}, version {number}.{people}{doi}',
+  citation: '{publisher} ({year}). {title}, data sheet {code}, version {number}.{people}{doi}',
+  citedTitle: '{title}: mutual diffusivity',
   citationPrepared: ' Prepared by {preparedBy}',
   citationReviewed: ', reviewed by {reviewedBy}',
   citationUnreleased: ' Not released; do not cite.',
