@@ -112,7 +112,7 @@ describe('content of a data sheet', () => {
     expect(statement).toContain('series h');
     const missing = texts(content.uncertainty.notIncluded);
     expect(missing).toContain('a bias common to all methods used');
-    expect(missing).toContain('Only peak broadening covers 362.95\u00a0K to 448.1\u00a0K');
+    expect(missing).toContain('From 362.95\u00a0K to 448.1\u00a0K one method only, peak broadening');
     expect(missing).toContain('Stated mole fractions of ethanol run from 0.05 to 0.05');
   });
 

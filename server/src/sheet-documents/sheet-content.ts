@@ -113,6 +113,9 @@ function rangeOf(correlation: EvaluableCorrelation, series: readonly SeriesFacts
   };
 }
 
+/** A part given to a few digits, in percent, without the dirt of the last binary digit. */
+const inPercent = (part: number): number => Number((100 * part).toPrecision(12));
+
 /** Estimates at T0, where it lies in the range, else at its lower end, and at the upper end. */
 function estimatesOf({ correlation, estimates }: SheetFacts): SheetEstimates {
   const { temperatureMinimum, temperatureMaximum } = correlation.validity;
@@ -125,7 +128,7 @@ function estimatesOf({ correlation, estimates }: SheetFacts): SheetEstimates {
     .filter((column) => column.temperatures.length === temperatures.length)
     .map(({ method, usualRelativeError, source, diffusivities }) => {
       const deviations = diffusivities.map((D, i) => 100 * (D / (fitted[i] ?? Number.NaN) - 1));
-      return { method, usualMeanError: 100 * usualRelativeError, source, diffusivities, deviations };
+      return { method, usualMeanError: inPercent(usualRelativeError), source, diffusivities, deviations };
     });
   const note = methods.length === 0 ? sheetStrings.noEstimates : sheetStrings.estimatesNote;
   return { temperatures, pressure, methods, note: plain(note) };

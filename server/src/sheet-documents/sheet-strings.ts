@@ -125,7 +125,7 @@ export const sheetStrings = {
   assignedUncertainty:
     'Where a source states no uncertainty, the usual value of its method was assigned: series {keys}.',
   biasNotIncluded: 'Not included: a bias common to all methods used.',
-  singleMethod: 'Only {method} covers {extent}; a bias of this one method is not included.',
+  singleMethod: 'From {extent} one method only, {method}: its own bias is not included.',
   composition: 'Dependence on composition, a few percent for very unequal molar masses, is neglected. {extent}',
   compositionStated: 'Stated mole fractions of {substance} run from {minimum} to {maximum}.',
   compositionUnknown: 'No mole fraction is stated with the points.',
@@ -213,6 +213,7 @@ export const sheetStrings = {
     pressure: 'Range in P',
     statement: 'Uncertainty',
     notIncluded: 'Not included',
+    caution: 'Caution',
     doi: 'DOI',
     hash: 'SHA-256',
     columns: {
