@@ -10,9 +10,9 @@ const RINGS = [
   ['series'],
   ['bring-in', 'fits'],
   ['data-sheets'],
-  ['sheet-documents', 'registrar'],
+  ['sheet-documents', 'registrar', 'subscriptions'],
   ['reviews', 'releases'],
-  ['subscriptions', 'exports', 'home', 'health', 'explorer'],
+  ['exports', 'home', 'health', 'explorer'],
 ];
 
 const inRing = (modules) => `^server/src/(${modules.join('|')})/`;
