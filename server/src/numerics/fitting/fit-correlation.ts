@@ -1,0 +1,58 @@
+import { findForm } from '../correlations/forms.js';
+import { type CorrelationForm } from '../correlations/form.js';
+import { NoConvergence } from '../least-squares/solve.js';
+import { EngineError, type EngineProblem } from './engine-error.js';
+import { fitColumns } from './fit-columns.js';
+import { notDeterminable, problemsOfDetermination, problemsOfInput } from './fit-checks.js';
+import { fitTask } from './fit-task.js';
+import { type FitOutcome, type FitRecipe, type FitSeries } from './fit.types.js';
+import { fitMixed } from './mixed-fit.js';
+import { fitPooled } from './pooled-fit.js';
+import { reportFit } from './report-fit.js';
+
+/**
+ * Fits a correlation to series of one gas pair.
+ *
+ * What the caller can mend comes back as problems; nothing is thrown for data. The result depends on the numbers only:
+ * the order of series and points, and the keys, change no bit. Every number of a result is finite.
+ *
+ * The derivation stands in the README of this folder.
+ */
+export function fitCorrelation(series: readonly FitSeries[], recipe: FitRecipe): FitOutcome {
+  const problems = problemsOfInput(series, recipe);
+  const form = findForm(recipe.form);
+  if (problems.length > 0 || !form) return { ok: false, problems };
+  const undetermined = problemsOfDetermination(
+    series.flatMap(({ points }) => points),
+    form,
+  );
+  if (undetermined.length > 0) return { ok: false, problems: undetermined };
+  try {
+    return fitSound(series, recipe, form);
+  } catch (error) {
+    return { ok: false, problems: [problemOf(error)] };
+  }
+}
+
+function fitSound(series: readonly FitSeries[], recipe: FitRecipe, form: CorrelationForm): FitOutcome {
+  const task = fitTask(form, recipe, fitColumns(series));
+  const estimate = recipe.seriesEffect === 'POOLED' ? fitPooled(task) : fitMixed(task);
+  const fit = reportFit(task, estimate, series);
+  const numbers = [
+    ...fit.parameters.map(({ value }) => value),
+    ...fit.covariance.flat(),
+    ...fit.seriesOffsets.map(({ offset }) => offset),
+  ];
+  if (numbers.every(Number.isFinite)) return { ok: true, fit };
+  return {
+    ok: false,
+    problems: [notDeterminable('The numbers are too far apart in size for any result to be finite')],
+  };
+}
+
+/** Only what the data cause is a problem; anything else is a fault and goes on up. */
+function problemOf(error: unknown): EngineProblem {
+  if (error instanceof EngineError) return error.asProblem();
+  if (error instanceof NoConvergence) return notDeterminable(error.message);
+  throw error;
+}

@@ -1,0 +1,70 @@
+import { type CorrelationForm, type ReducedData, type ReferenceState } from '../correlations/form.js';
+import { lnResidual } from '../correlations/design.js';
+import { weightedMean, type FitColumns } from './fit-columns.js';
+import { type FitRecipe } from './fit.types.js';
+
+/** A fit about to be made: its points in reduced coordinates about the centre of the data. */
+export interface FitTask {
+  readonly form: CorrelationForm;
+  readonly recipe: FitRecipe;
+  readonly columns: FitColumns;
+  /** Reference state of the computation: the weighted means of ln T and ln P, where D0 and n are least correlated */
+  readonly centre: ReferenceState;
+  readonly data: ReducedData;
+}
+
+export function fitTask(form: CorrelationForm, recipe: FitRecipe, columns: FitColumns): FitTask {
+  const weights = columns.relativeU.diffusivity.map((u) => (recipe.weighting === 'EQUAL' ? 1 : 1 / (u * u)));
+  const lnT = weightedMean(columns.lnTemperature, weights);
+  const lnP = weightedMean(columns.lnPressure, weights);
+  const data = {
+    x: columns.lnTemperature.map((value) => value - lnT),
+    p: columns.lnPressure.map((value) => value - lnP),
+    lnDiffusivity: columns.lnDiffusivity,
+  };
+  return { form, recipe, columns, centre: { temperature: Math.exp(lnT), pressure: Math.exp(lnP) }, data };
+}
+
+/** ln D − ln f at every point; `beta` is ln D0 at the centre, then the shape. */
+export function lnDeviations(task: FitTask, beta: Float64Array): Float64Array {
+  const shape = beta.subarray(1);
+  return lnResidual(task.form, shape, task.data, task.centre).map((value) => value - beta[0]!);
+}
+
+/**
+ * Residuals of the objective relative to f: ln D − ln f, or (D − f)/f. Either way their derivative by ln D0 and the
+ * shape is −∂ ln f, so that one weighted linear algebra serves both objectives.
+ */
+export function relativeResiduals(task: FitTask, deviations: Float64Array): Float64Array {
+  return task.recipe.objective === 'LN_DIFFUSIVITY' ? deviations : deviations.map(Math.expm1);
+}
+
+/**
+ * Variances of the relative residuals, before any common scale.
+ *
+ * STATED takes (u(D)/D)²; EFFECTIVE_VARIANCE adds what u(T) and u(P) do to f, by the fitted exponents (J. Orear,
+ * *Am. J. Phys.* 50 (1982) 912); EQUAL is one unit of the objective: 1 in ln D, 1 m²/s in D.
+ */
+export function relativeVariances(task: FitTask, beta: Float64Array, deviations: Float64Array): Float64Array {
+  const { form, recipe, columns, centre, data } = task;
+  const shape = beta.subarray(1);
+  const isLogarithmic = recipe.objective === 'LN_DIFFUSIVITY';
+  const { diffusivity: uD, temperature: uT, pressure: uP } = columns.relativeU;
+  const exponentOfP = form.pressureExponent(shape);
+  return deviations.map((deviation, i) => {
+    // On D, what is stated in m²/s is brought to the fitted value: u(D)/f = (u(D)/D) (D/f).
+    const ratio = isLogarithmic ? 1 : Math.exp(deviation);
+    if (recipe.weighting === 'EQUAL') return isLogarithmic ? 1 : (ratio / columns.diffusivity[i]!) ** 2;
+    const ofDiffusivity = (uD[i]! * ratio) ** 2;
+    if (recipe.weighting === 'STATED') return ofDiffusivity;
+    const exponentOfT = form.temperatureExponent(shape, data.x[i]!, centre);
+    return ofDiffusivity + (exponentOfT * uT[i]!) ** 2 + (exponentOfP * uP[i]!) ** 2;
+  });
+}
+
+/** Do the variances move with the parameters, beyond what the objective's own solver follows? */
+export function variancesFollowFit({ recipe, columns }: FitTask): boolean {
+  const { temperature, pressure } = columns.relativeU;
+  const isStated = (column: Float64Array) => column.some((u) => u > 0);
+  return recipe.weighting === 'EFFECTIVE_VARIANCE' && (isStated(temperature) || isStated(pressure));
+}

@@ -1,0 +1,30 @@
+import { type CorrelationForm } from '../correlations/form.js';
+import { type FitColumns } from './fit-columns.js';
+import { type Validity } from './fit.types.js';
+
+/**
+ * Where D ∝ 1/P is assumed, it is taken to hold from 1 kPa (a choice, no source) to 400 kPa (D P of water in nitrogen
+ * is constant to about 4 atm: C. V. Paganelli, F. K. Kurata, *Respir. Physiol.* 30 (1977) 15), widened to hold the points.
+ */
+const ASSUMED_PRESSURES = { minimum: 1e3, maximum: 4e5 };
+
+/** The range of the points that carried weight. */
+export function validityOf(form: CorrelationForm, columns: FitColumns, weights: Float64Array): Validity {
+  const carried = (column: Float64Array) => column.filter((_, i) => weights[i]! > 0);
+  const temperatures = extent(carried(columns.temperature));
+  const pressures = extent(carried(columns.pressure));
+  return {
+    temperatureMinimum: temperatures.minimum,
+    temperatureMaximum: temperatures.maximum,
+    pressureMinimum: form.fitsPressure ? pressures.minimum : Math.min(pressures.minimum, ASSUMED_PRESSURES.minimum),
+    pressureMaximum: form.fitsPressure ? pressures.maximum : Math.max(pressures.maximum, ASSUMED_PRESSURES.maximum),
+    pressureBasis: form.fitsPressure ? 'MEASURED' : 'STATED',
+  };
+}
+
+function extent(values: Float64Array): { minimum: number; maximum: number } {
+  return {
+    minimum: values.reduce((a, b) => Math.min(a, b), Infinity),
+    maximum: values.reduce((a, b) => Math.max(a, b), 0),
+  };
+}

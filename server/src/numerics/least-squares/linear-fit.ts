@@ -1,0 +1,43 @@
+import {
+  applyQTransposed,
+  columnNorms,
+  dependentColumn,
+  factorise,
+  inverseGram,
+  solveUpper,
+} from '../linear-algebra/qr.js';
+
+export interface LinearFit {
+  readonly solution: Float64Array;
+  /** (XᵀWX)⁻¹ */
+  readonly unscaledCovariance: number[][];
+}
+
+/** A column is taken as dependent on those before it when less than this part of its length stands out of them. */
+const DEPENDENT = 1e-9;
+
+/**
+ * Weighted linear least squares by QR of the whitened design.
+ *
+ * @param design  column-major rows×columns; kept
+ * @param right   length rows; kept
+ * @param weights length rows, ≥ 0: reciprocal variances
+ * @returns the fit, or the index of the first parameter that the rows cannot tell from those before it
+ */
+export function fitLinear(
+  design: Float64Array,
+  right: Float64Array,
+  weights: Float64Array,
+): LinearFit | { readonly undeterminable: number } {
+  const rows = right.length;
+  const columns = design.length / rows;
+  const roots = weights.map(Math.sqrt);
+  const whitened = design.map((value, i) => value * roots[i % rows]!);
+  const norms = columnNorms(whitened, rows, columns);
+  const factors = factorise(whitened, rows, columns);
+  const undeterminable = dependentColumn(factors, norms, DEPENDENT);
+  if (undeterminable >= 0) return { undeterminable };
+  const response = right.map((value, i) => value * roots[i]!);
+  applyQTransposed(factors, response);
+  return { solution: solveUpper(factors, response), unscaledCovariance: inverseGram(factors) };
+}
