@@ -1,6 +1,7 @@
 import { Field, ID, InterfaceType } from '@nestjs/graphql';
 
-@InterfaceType('Node')
+/** Entities are instances of the class that bears the type's name. */
+@InterfaceType('Node', { resolveType: (value: object) => value.constructor.name })
 export abstract class Node {
   @Field(() => ID)
   id: string;

@@ -165,6 +165,7 @@ const FITS = `
     number          int NOT NULL CONSTRAINT ck_fits_number CHECK (number >= 1),
     recipe          jsonb NOT NULL,
     excluded_points jsonb NOT NULL,
+    left_out_series jsonb NOT NULL,
     result          jsonb NOT NULL,
     engine_version  text NOT NULL,
     created_by_id   uuid NOT NULL CONSTRAINT fk_fits_created_by REFERENCES people,

@@ -1,0 +1,13 @@
+import { Module } from '@nestjs/common';
+import { PairsModule } from '../pairs/pairs.module.js';
+import { PeopleModule } from '../people/people.module.js';
+import { SeriesPointsStore } from './series-points.store.js';
+import { PairSeriesResolver, SeriesEventsResolver, SeriesResolver } from './series.resolver.js';
+import { SeriesService } from './series.service.js';
+
+@Module({
+  imports: [PairsModule, PeopleModule],
+  providers: [SeriesService, SeriesPointsStore, SeriesResolver, SeriesEventsResolver, PairSeriesResolver],
+  exports: [SeriesService, SeriesPointsStore],
+})
+export class SeriesModule {}
