@@ -67,7 +67,7 @@ function fitTangent(task: FitTask, beta: Float64Array): TangentFit {
     common: columns.common.map((common) => common / unit),
   });
   const model = componentModel(task, unit);
-  return { variances, foreseen, unit, spread, products, model, fitted: fitComponents(products, model, true) };
+  return { variances, foreseen, unit, spread, products, model, fitted: fitComponents(products, model, true, null) };
 }
 
 function componentModel({ recipe, columns }: FitTask, unit: number): ComponentModel {
@@ -132,8 +132,8 @@ function predictedDeviation({ products, fitted, unit, spread }: TangentFit, s: n
 
 /** Likelihood of the objective's response at its own maximum (ML, not REML), which AICc needs. */
 function likelihoodOf(task: FitTask, round: TangentFit, beta: Float64Array): Estimate['likelihood'] {
-  const { variances, foreseen, products, model } = round;
-  const { at } = fitComponents(products, model, false);
+  const { variances, foreseen, products, model, fitted } = round;
+  const { at } = fitComponents(products, model, false, fitted.components);
   const deviations = lnDeviations(task, beta);
   let lnUnits = 0;
   for (let i = 0; i < variances.length; i++) {

@@ -21,44 +21,51 @@ export interface FittedComponents {
   readonly at: LikelihoodAt;
 }
 
-/** Starts of the intercept and slope deviations, in units of the scatter of all points; the best end is taken. */
-const STARTS: readonly (readonly [number, number])[] = [
-  [1, 1],
-  [1, 0.1],
-  [0.1, 1],
-  [0.1, 0.1],
-];
-
 /**
  * Variance components by (restricted) maximum likelihood, over the factor of G = L Lᵀ and the root of the scale's
  * excess, so that the search has no bounds: a component of zero is an ordinary stationary point.
  *
  * @param series products of responses of order 1
+ * @param near   components to start from; otherwise large and small ones are tried, and the better end is taken
  */
 export function fitComponents(
   series: readonly SeriesProducts[],
   model: ComponentModel,
   restricted: boolean,
+  near: VarianceComponents | null,
 ): FittedComponents {
   const evaluate = (point: Float64Array): Valued => {
     const at = likelihoodAt(series, componentsOf(point, model), restricted);
     return { value: Number.isFinite(at.value) ? at.value : Infinity, gradient: gradientOf(point, at, model) };
   };
-  let best: FittedComponents | null = null;
-  for (const start of startsOf(model)) {
+  const ends = startsOf(model, near).map((start) => {
     const components = componentsOf(minimise(evaluate, start), model);
-    const at = likelihoodAt(series, components, restricted);
-    if (!best || at.value < best.at.value - 1e-9) best = { components, at };
-  }
-  return best!;
+    return { components, at: likelihoodAt(series, components, restricted) };
+  });
+  return ends.reduce((best, end) => (end.at.value < best.at.value - EQUALLY_GOOD ? end : best));
 }
 
+/** Ends whose −2 ln likelihoods differ by less are one; the first is kept, whatever rounding says. */
+const EQUALLY_GOOD = 1e-9;
+/** Deviations to start from, in units of the scatter of all points: wide enough apart to find a second minimum. */
+const STARTS = [1, 0.1];
+/** No component starts at zero exactly: the gradient there vanishes, minimum or not. */
+const OFF_ZERO = 0.05;
+
 /** The variables of the search: root of the scale's excess, then the factor of G as far as it is estimated. */
-function startsOf({ leastScale, estimated }: ComponentModel): Float64Array[] {
-  const scale = Math.max(0.3, 1 - leastScale);
-  if (estimated === 'NONE') return [new Float64Array([scale])];
-  if (estimated === 'INTERCEPT') return [1, 0.1].map((a) => new Float64Array([scale, a]));
-  return STARTS.map(([a, c]) => new Float64Array([scale, a, 0, c]));
+function startsOf({ leastScale, estimated }: ComponentModel, near: VarianceComponents | null): Float64Array[] {
+  const size = { NONE: 1, INTERCEPT: 2, INTERCEPT_AND_SLOPE: 4 }[estimated];
+  const starts = near ? [factorOf(near, leastScale)] : STARTS.map((a) => [0.3, a, 0, a]);
+  return starts.map((start) => Float64Array.from(start.slice(0, size)));
+}
+
+function factorOf({ scale, between }: VarianceComponents, leastScale: number): number[] {
+  const a = Math.sqrt(between.intercept) || OFF_ZERO;
+  const b = between.covariance / a;
+  const c = Math.sqrt(Math.max(0, between.slope - b * b));
+  return [Math.sqrt(Math.max(0, scale - leastScale)), a, b, c].map((value) =>
+    Math.abs(value) < OFF_ZERO ? OFF_ZERO : value,
+  );
 }
 
 function componentsOf(point: Float64Array, { leastScale, estimated, assigned }: ComponentModel): VarianceComponents {

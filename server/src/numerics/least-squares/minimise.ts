@@ -45,9 +45,8 @@ function newtonStep(
   const hessian = new Matrix(size, size);
   for (let k = 0; k < size; k++) {
     const width = DIFFERENCE * Math.max(1, Math.abs(point[k]!));
-    const above = evaluate(shifted(point, k, width)).gradient;
-    const below = evaluate(shifted(point, k, -width)).gradient;
-    for (let i = 0; i < size; i++) hessian.set(i, k, (above[i]! - below[i]!) / (2 * width));
+    const beside = evaluate(shifted(point, k, width)).gradient;
+    for (let i = 0; i < size; i++) hessian.set(i, k, (beside[i]! - gradient[i]!) / width);
   }
   const { realEigenvalues, eigenvectorMatrix } = new EigenvalueDecomposition(
     hessian.add(hessian.transpose()).mul(0.5),
