@@ -165,6 +165,7 @@ const versionRow = z.strictObject({
 });
 
 const margin = z.strictObject({
+  fitNumber: text,
   entries: z.array(z.strictObject({ label: runs, value: text })),
   fit: paragraphs,
   figures: paragraphs,

@@ -1,5 +1,6 @@
 import { sampleCorrelation, sampleSheetFacts } from '../../test/builders/sheet-facts.js';
-import { buildSheetContent, documentSubject, documentTitle } from './sheet-content.js';
+import { documentSubject, documentTitle } from './document-names.js';
+import { buildSheetContent } from './sheet-content.js';
 import { withStanding } from './sheet-provenance.js';
 import { singleMethodStretches } from './sheet-uncertainty.js';
 import { plainText } from './typeset.js';

@@ -133,17 +133,3 @@ function estimatesOf({ correlation, estimates }: SheetFacts): SheetEstimates {
   const note = methods.length === 0 ? sheetStrings.noEstimates : sheetStrings.estimatesNote;
   return { temperatures, pressure, methods, note: plain(note) };
 }
-
-/** The sheet's name as the title of a document. */
-export const documentTitle = (content: SheetContent): string =>
-  sheetStrings.documentTitle
-    .replace('{title}', () => content.title)
-    .replace('{code}', content.code)
-    .replace('{number}', content.number);
-
-/** What the document is about, for its metadata. */
-export const documentSubject = (content: SheetContent): string =>
-  sheetStrings.subject
-    .replace('{title}', () => content.title)
-    .replace('{temperature}', content.range.temperaturePrinted)
-    .replace('{pressure}', content.range.pressurePrinted);

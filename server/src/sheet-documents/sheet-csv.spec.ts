@@ -7,7 +7,7 @@ const facts = sampleSheetFacts();
 const content = buildSheetContent(facts);
 
 function read(text: string): { identity: Map<string, string>; head: string[]; rows: number[][] } {
-  const records = parse<string[]>(text, { relax_column_count: true, skip_empty_lines: true });
+  const records: string[][] = parse(text, { relax_column_count: true, skip_empty_lines: true });
   const start = records.findIndex(([first]) => first === 'temperature_k');
   return {
     identity: new Map(records.slice(0, start).map(([label = '', value = '']) => [label, value])),

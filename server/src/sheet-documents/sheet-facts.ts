@@ -1,5 +1,5 @@
 import type { Estimate } from '../numerics/estimates/estimates.js';
-import type { EvaluableCorrelation, FitRecipe } from '../numerics/fitting/fit.types.js';
+import type { EvaluableCorrelation, FitRecipe, FitStatistics } from '../numerics/fitting/fit.types.js';
 
 export type VersionStatusName =
   'DRAFT' | 'IN_REVIEW' | 'RETURNED' | 'APPROVED' | 'RELEASED' | 'SUPERSEDED' | 'WITHDRAWN';
@@ -60,15 +60,7 @@ export interface FitFacts {
   readonly createdAt: string;
   readonly engineVersion: string;
   readonly recipe: FitRecipe;
-  readonly statistics: {
-    readonly pointCount: number;
-    readonly seriesCount: number;
-    readonly residualDegreesOfFreedom: number;
-    readonly reducedChiSquare: number | null;
-    /** τ, of ln D */
-    readonly betweenSeriesDeviation: number | null;
-    readonly betweenSeriesOrigin: 'STATED' | 'ASSIGNED' | null;
-  };
+  readonly statistics: FitStatistics;
 }
 
 /** The estimates of the pair at one state; fewer where a method does not reach it. */

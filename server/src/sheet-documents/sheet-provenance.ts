@@ -96,6 +96,7 @@ export function sheetCitation(facts: SheetFacts, title: string): SheetCitation {
 /** What stands beside the sections. */
 export function sheetMargin(facts: SheetFacts, drawnPoints: number): SheetMargin {
   return {
+    fitNumber: String(facts.fit.number),
     entries: marginEntries(facts),
     fit: [
       fitSentence(facts.fit),

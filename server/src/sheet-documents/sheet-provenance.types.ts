@@ -85,6 +85,8 @@ export class MarginEntry {
 
 @ObjectType({ description: 'What stands in the margin: state and people, and where the numbers came from' })
 export class SheetMargin {
+  @Field({ description: 'Number of the fit among those of the pair, for its label' })
+  readonly fitNumber: string;
   @Field(() => [MarginEntry], { description: 'State, version, range, dates, people' })
   readonly entries: MarginEntry[];
   @Field(() => [[TextRun]], { description: 'Beside the correlation: the fit and how it was made' })

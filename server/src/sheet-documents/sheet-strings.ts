@@ -59,6 +59,7 @@ export const sheetStrings = {
     'Diffusivity reduced to {pressure} against temperature, both axes logarithmic. Bars are ±*u*, left away where the point hides them; open points carried no weight. Coloured axis: validity range.',
   figure2:
     'Deviation of each point from the fit, in percent, with the estimates behind the points. Bars are ±*u*; an arrow gives the value of a point beyond the scale.',
+  figureTitle: 'Figure {number}.',
   figureThinned: ' Of longer series every {nth} point is drawn.',
   figureKeys: {
     fit: 'fit {number}',
@@ -100,7 +101,7 @@ export const sheetStrings = {
   },
   leftOut: 'Left out',
   pointsLeftOut: 'Points left out',
-  assignedMark: 'assigned',
+  assignedMark: '* the usual value of the method, since the source states none',
 
   origins: {
     TABLE: 'table',

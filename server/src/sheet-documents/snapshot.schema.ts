@@ -58,9 +58,15 @@ const fit: z.ZodType<FitFacts> = z.strictObject({
     pointCount: z.int(),
     seriesCount: z.int(),
     residualDegreesOfFreedom: z.number(),
+    chiSquare: z.number().nullable(),
     reducedChiSquare: z.number().nullable(),
+    chiSquareProbability: z.number().nullable(),
+    residualStandardError: z.number().nullable(),
+    aicc: z.number().nullable(),
     betweenSeriesDeviation: z.number().nullable(),
     betweenSeriesOrigin: z.enum(['STATED', 'ASSIGNED']).nullable(),
+    cochranQ: z.number().nullable(),
+    iSquared: z.number().nullable(),
   }),
 });
 

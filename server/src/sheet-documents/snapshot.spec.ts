@@ -57,7 +57,12 @@ describe('snapshot of a release', () => {
   });
 
   it('does not depend on how the version stood before its release', () => {
-    const draft = { ...facts, releasedAt: null, standing: { ...facts.standing, status: 'APPROVED' } } as const;
+    const versions = facts.versions.map((version) => {
+      if (version.number === facts.number) return { ...version, status: 'APPROVED', releasedAt: null } as const;
+      return version.status === 'SUPERSEDED' ? ({ ...version, status: 'RELEASED' } as const) : version;
+    });
+    const standing = { ...facts.standing, status: 'APPROVED' } as const;
+    const draft = { ...facts, releasedAt: null, standing, versions };
     expect(snapshotOf(draft, release).contentHash).toBe(contentHash);
   });
 

@@ -1,6 +1,6 @@
 import { canonicalJson, sha256Of } from './canonical-json.js';
 import { buildSheetContent } from './sheet-content.js';
-import type { SheetFacts } from './sheet-facts.js';
+import type { SheetFacts, VersionFacts } from './sheet-facts.js';
 import { SNAPSHOT_FORMAT, type Snapshot, snapshotSchema } from './snapshot.schema.js';
 
 /** What only the act of release knows. */
@@ -43,9 +43,22 @@ export function snapshotOf(facts: SheetFacts, release: ReleaseFacts): { text: st
     correlation,
     fit,
     series,
-    content: buildSheetContent({ ...facts, people, releasedAt, doi, standing }),
+    content: buildSheetContent({
+      ...facts,
+      people,
+      releasedAt,
+      doi,
+      standing,
+      versions: facts.versions.map((version) => onRelease(version, facts.number, releasedAt)),
+    }),
   });
   return { text, contentHash: sha256Of(text) };
+}
+
+/** How a version of the sheet stands once version `number` is released. */
+function onRelease(version: VersionFacts, number: string, releasedAt: string): VersionFacts {
+  if (version.number === number) return { ...version, status: 'RELEASED', releasedAt };
+  return version.status === 'RELEASED' ? { ...version, status: 'SUPERSEDED' } : version;
 }
 
 /**

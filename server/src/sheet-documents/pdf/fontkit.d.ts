@@ -1,0 +1,9 @@
+/** The part of fontkit that is used here; the package ships no types. */
+declare module 'fontkit' {
+  interface FontkitFont {
+    readonly unitsPerEm: number;
+    layout(text: string, features?: readonly string[]): { readonly advanceWidth: number };
+    hasGlyphForCodePoint(codePoint: number): boolean;
+  }
+  export function openSync(path: string): FontkitFont;
+}
