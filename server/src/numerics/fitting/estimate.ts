@@ -22,8 +22,8 @@ export interface Estimate {
   /** Mean residuals that belong to the series rather than to the points; one per row */
   readonly seriesParts: Float64Array;
   readonly betweenSeries: BetweenSeries | null;
-  /** STATED: estimated from the data; ASSIGNED: taken as known */
-  readonly deviationOrigin: 'STATED' | 'ASSIGNED';
+  /** τ, and whether it was estimated from the data (STATED) or taken as known (ASSIGNED); null when there is neither */
+  readonly deviation: { readonly value: number; readonly origin: 'STATED' | 'ASSIGNED' } | null;
   /** −2 ln likelihood at its maximum and the parameters it counts; null where there is no likelihood */
   readonly likelihood: { readonly minusTwoLog: number; readonly parameterCount: number } | null;
 }

@@ -5,7 +5,7 @@ import { EngineError, type EngineProblem } from './engine-error.js';
 import { fitColumns } from './fit-columns.js';
 import { notDeterminable, problemsOfDetermination, problemsOfInput } from './fit-checks.js';
 import { fitTask } from './fit-task.js';
-import { type FitOutcome, type FitRecipe, type FitSeries } from './fit.types.js';
+import { type FitOutcome, type FitRecipe, type FitSeries, type FittedCorrelation } from './fit.types.js';
 import { fitMixed } from './mixed-fit.js';
 import { fitPooled } from './pooled-fit.js';
 import { reportFit } from './report-fit.js';
@@ -38,16 +38,17 @@ function fitSound(series: readonly FitSeries[], recipe: FitRecipe, form: Correla
   const task = fitTask(form, recipe, fitColumns(series));
   const estimate = recipe.seriesEffect === 'POOLED' ? fitPooled(task) : fitMixed(task);
   const fit = reportFit(task, estimate, series);
-  const numbers = [
-    ...fit.parameters.map(({ value }) => value),
-    ...fit.covariance.flat(),
-    ...fit.seriesOffsets.map(({ offset }) => offset),
-  ];
-  if (numbers.every(Number.isFinite)) return { ok: true, fit };
+  if (isFinite(fit)) return { ok: true, fit };
   return {
     ok: false,
     problems: [notDeterminable('The numbers are too far apart in size for any result to be finite')],
   };
+}
+
+/** D0 may also have run down to zero at a far reference state, where nothing can be said in logarithms. */
+function isFinite({ parameters, covariance, correlationMatrix }: FittedCorrelation): boolean {
+  const numbers = [...parameters.map(({ value }) => value), ...covariance.flat(), ...correlationMatrix.flat()];
+  return parameters[0]!.value > 0 && numbers.every(Number.isFinite);
 }
 
 /** Only what the data cause is a problem; anything else is a fault and goes on up. */

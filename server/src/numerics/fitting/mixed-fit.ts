@@ -3,7 +3,7 @@ import { scaled, zeros } from '../linear-algebra/matrices.js';
 import { EngineError } from './engine-error.js';
 import { type Estimate } from './estimate.js';
 import { lnDeviations, relativeResiduals, relativeVariances, variancesFollowFit, type FitTask } from './fit-task.js';
-import { type BetweenSeries } from './fit.types.js';
+import { type BetweenSeries, type FitRecipe } from './fit.types.js';
 import { fitPooled } from './pooled-fit.js';
 import { likelihoodAt, type SeriesProducts } from './restricted-likelihood.js';
 import { seriesProducts } from './series-products.js';
@@ -71,14 +71,17 @@ function fitTangent(task: FitTask, beta: Float64Array): TangentFit {
 }
 
 function componentModel({ recipe, columns }: FitTask, unit: number): ComponentModel {
-  const deviation = recipe.betweenSeriesDeviation ?? USUAL_DEVIATION;
   const isAssigned = columns.seriesCount < ENOUGH_SERIES || recipe.betweenSeriesDeviation !== null;
   const estimated = recipe.seriesEffect === 'RANDOM_INTERCEPT' ? 'INTERCEPT' : 'INTERCEPT_AND_SLOPE';
   return {
     leastScale: recipe.weighting === 'EQUAL' ? LEAST_SCALE : 1,
     estimated: isAssigned ? 'NONE' : estimated,
-    assigned: { intercept: (deviation / unit) ** 2, covariance: 0, slope: 0 },
+    assigned: { intercept: (assignedDeviation(recipe) / unit) ** 2, covariance: 0, slope: 0 },
   };
+}
+
+function assignedDeviation({ betweenSeriesDeviation }: FitRecipe): number {
+  return betweenSeriesDeviation ?? USUAL_DEVIATION;
 }
 
 function estimateOf(task: FitTask, round: TangentFit, beta: Float64Array): Estimate {
@@ -110,7 +113,9 @@ function estimateOf(task: FitTask, round: TangentFit, beta: Float64Array): Estim
     }),
     seriesParts: perPoint(task, (s, i) => predictedDeviation(round, s, data.x[i]!)),
     betweenSeries: between,
-    deviationOrigin: isAssigned ? 'ASSIGNED' : 'STATED',
+    deviation: isAssigned
+      ? { value: assignedDeviation(recipe), origin: 'ASSIGNED' }
+      : { value: Math.sqrt(between.intercept), origin: 'STATED' },
     likelihood: likelihoodOf(task, round, beta),
   };
 }

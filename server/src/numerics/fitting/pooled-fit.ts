@@ -33,6 +33,7 @@ export function fitPooled(task: FitTask): Estimate {
     residuals,
     variances.map((variance) => 1 / variance),
   );
+  const given = task.recipe.betweenSeriesDeviation;
   const knownCovariance = commonCovariance(task, beta, variances, robustWeights);
   return {
     beta,
@@ -46,7 +47,7 @@ export function fitPooled(task: FitTask): Estimate {
     marginalVariances: variances.map((variance) => variance * scale),
     seriesParts: new Float64Array(residuals.length),
     betweenSeries: assignedScatter(task),
-    deviationOrigin: 'ASSIGNED',
+    deviation: given === null ? null : { value: given, origin: 'ASSIGNED' },
     likelihood: task.recipe.loss === 'LEAST_SQUARES' ? likelihoodOf(task, variances, chiSquare, beta) : null,
   };
 }

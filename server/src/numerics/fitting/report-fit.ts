@@ -53,10 +53,7 @@ export function reportFit(task: FitTask, estimate: Estimate, series: readonly Fi
       cookDistances: cookDistances(task, estimate, deviations),
       reducedChiSquare: statistics.reducedChiSquare,
       chiSquareProbability: statistics.chiSquareProbability,
-      deviation:
-        statistics.betweenSeriesDeviation === null || statistics.betweenSeriesOrigin === null
-          ? null
-          : { value: statistics.betweenSeriesDeviation, origin: statistics.betweenSeriesOrigin },
+      deviation: estimate.deviation,
     }),
   };
 }
@@ -75,8 +72,8 @@ function statisticsOf(task: FitTask, estimate: Estimate, deviations: Float64Arra
     chiSquareProbability: isStated ? chiSquareExceedance(estimate.chiSquare, freedom) : null,
     residualStandardError: residualStandardError(task, estimate, deviations),
     aicc: aiccOf(estimate, columns.count),
-    betweenSeriesDeviation: estimate.betweenSeries ? Math.sqrt(estimate.betweenSeries.intercept) : null,
-    betweenSeriesOrigin: estimate.betweenSeries ? estimate.deviationOrigin : null,
+    betweenSeriesDeviation: estimate.deviation?.value ?? null,
+    betweenSeriesOrigin: estimate.deviation?.origin ?? null,
     cochranQ: spread?.cochranQ ?? null,
     iSquared: spread?.iSquared ?? null,
   };
