@@ -11,8 +11,8 @@ const ZIP_LOCAL_HEADER = [0x50, 0x4b, 0x03, 0x04];
 const startsWith = (bytes: Uint8Array, prefix: readonly number[]): boolean =>
   prefix.every((byte, index) => bytes[index] === byte);
 
-/** Control characters that no table of text holds: all but tab, line ends, form feeds and escape. */
-export const CONTROL = /(?![\t-\r\u001b\u007f-\u009f])\p{Cc}/u;
+/** Control characters that no table of text holds: all but tab, line ends and form feeds. */
+export const CONTROL = /(?![\t-\r\u007f-\u009f])\p{Cc}/u;
 
 const isForeign = (byte: number): boolean => byte < 32 && CONTROL.test(String.fromCharCode(byte));
 
