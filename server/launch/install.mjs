@@ -1,20 +1,20 @@
 // Brings node_modules to what package-lock.json says and builds what is missing or older than its sources.
+import { createHash } from 'node:crypto';
 import fs from 'node:fs';
 import path from 'node:path';
 import { newestChange, ROOT, run, say } from './shell.mjs';
 
-/** npm writes this file last, so that a broken install is done again. */
-const INSTALLED = path.join(ROOT, 'node_modules/.package-lock.json');
+/** Written after an install, so that a broken one is done again: the hash of the lock file it was made from. */
+const INSTALLED = path.join(ROOT, 'node_modules/.installed-lock-sha256');
 
 export function installPackages() {
-  const wanted = ['package.json', 'package-lock.json', 'server/package.json', 'client/package.json'].map((file) =>
-    path.join(ROOT, file),
-  );
-  if (fs.existsSync(INSTALLED) && fs.statSync(INSTALLED).mtimeMs >= newestChange(wanted)) return;
+  const lock = createHash('sha256')
+    .update(fs.readFileSync(path.join(ROOT, 'package-lock.json')))
+    .digest('hex');
+  if (fs.existsSync(INSTALLED) && fs.readFileSync(INSTALLED, 'utf8') === lock) return;
   say('Installing packages …');
-  run('npm', ['ci', '--include=dev', '--no-audit', '--no-fund']);
-  // A checkout may bear dates later than the install; what is installed now is what the lock file says.
-  fs.utimesSync(INSTALLED, new Date(), new Date());
+  run('npm', ['ci', '--include=dev', '--no-audit', '--no-fund', '--loglevel=error']);
+  fs.writeFileSync(INSTALLED, lock);
 }
 
 const isTest = (file) => /\.(spec|e2e-spec)\.tsx?$/.test(file) || /\/(node_modules|dist|e2e)\//.test(file);

@@ -234,7 +234,7 @@ export async function startPostgres(dataFolder, { durable = true } = {}) {
     clearTimeout(forced);
   };
   const ensureDatabase = (name) => {
-    if (psql(`select from pg_database where datname = '${name}'`).stdout.length > 0) return;
+    if (psql(`select 1 from pg_database where datname = '${name}'`).stdout.length > 0) return;
     const made = psql(`create database "${name}"`);
     if (made.status !== 0) throw new LaunchError(`The database could not be made: ${made.stderr}`);
   };

@@ -2,7 +2,7 @@
 import { spawn } from 'node:child_process';
 import path from 'node:path';
 import { buildClient, buildServer, installPackages } from './install.mjs';
-import { startPostgres } from './postgres.mjs';
+import { freePort, startPostgres } from './postgres.mjs';
 import { launch, LaunchError, ROOT, say } from './shell.mjs';
 
 const SERVER_STOP_TIMEOUT_MS = 6_000;
@@ -55,6 +55,7 @@ await launch(async () => {
   buildClient();
 
   const env = { ...process.env, NODE_ENV: 'production', DIFFOLIO_DATA_DIR: dataFolder };
+  if (env.PORT === '0') env.PORT = String(await freePort());
   if (!env.DATABASE_URL) {
     postgres = await startPostgres(dataFolder);
     postgres.ensureDatabase('diffolio');

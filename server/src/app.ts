@@ -8,6 +8,7 @@ import { FastifyAdapter, type NestFastifyApplication } from '@nestjs/platform-fa
 import { AppModule } from './app.module.js';
 import { ProblemDetailsFilter } from './common/problem-details.filter.js';
 import { type Env } from './config/env.js';
+import { servePages } from './pages/pages.js';
 
 const BODY_LIMIT_BYTES = 1024 * 1024;
 const UPLOAD_LIMIT_BYTES = 20 * 1024 * 1024;
@@ -60,6 +61,7 @@ export async function createApp(env: Env, logger?: LoggerService): Promise<NestF
     crossOriginEmbedderPolicy: false,
     referrerPolicy: { policy: 'same-origin' },
   });
+  await servePages(app, env.DIFFOLIO_PAGES_DIR);
   app.useGlobalFilters(new ProblemDetailsFilter());
   app.enableShutdownHooks();
   return app;

@@ -11,6 +11,8 @@ const schema = z.object({
   PUBLIC_URL: z.url().optional(),
   DATABASE_URL: z.url(),
   DIFFOLIO_DATA_DIR: z.string().default('.data'),
+  /** The client's build. */
+  DIFFOLIO_PAGES_DIR: z.string().default('client/dist'),
   DIFFOLIO_DEMO: flag.default(false),
   /** Signs access tokens; drawn at random when absent, which signs everybody out at a restart. */
   JWT_SECRET: z.string().min(32).optional(),

@@ -1,4 +1,4 @@
-import { Inject, Injectable, Logger, type OnApplicationShutdown } from '@nestjs/common';
+import { Inject, Injectable, Logger, type BeforeApplicationShutdown } from '@nestjs/common';
 import { InjectDataSource } from '@nestjs/typeorm';
 import PgBoss from 'pg-boss';
 import { type DataSource, type EntityManager } from 'typeorm';
@@ -15,6 +15,8 @@ const BATCH_SIZE = 10;
 /** Looks for jobs whose server died, so that they run again. */
 const MAINTENANCE_INTERVAL_SECONDS = 30;
 const FAILED_KEPT_SECONDS = 14 * 24 * 3600;
+/** Longer than any `onceInSeconds`: the queue looks among the jobs kept for the one that was made already. */
+const COMPLETED_KEPT_SECONDS = 2 * 24 * 3600;
 const STOP_TIMEOUT_MS = 5_000;
 
 /** Jobs that failed for good, kept for the administrators. */
@@ -40,7 +42,7 @@ export interface FailedJob {
 
 /** The job queue in PostgreSQL. A job sent inside a transaction exists exactly when that transaction commits. */
 @Injectable()
-export class JobsService implements OnApplicationShutdown {
+export class JobsService implements BeforeApplicationShutdown {
   private readonly log = new Logger('Jobs');
   private readonly boss: PgBoss;
   private readonly queues = new Map<string, Promise<void>>();
@@ -59,6 +61,7 @@ export class JobsService implements OnApplicationShutdown {
       query_timeout: QUERY_TIMEOUT_MS,
       statement_timeout: QUERY_TIMEOUT_MS,
       schedule: false,
+      archiveCompletedAfterSeconds: COMPLETED_KEPT_SECONDS,
       archiveFailedAfterSeconds: FAILED_KEPT_SECONDS,
       maintenanceIntervalSeconds: MAINTENANCE_INTERVAL_SECONDS,
     };
@@ -121,7 +124,8 @@ export class JobsService implements OnApplicationShutdown {
     );
   }
 
-  async onApplicationShutdown(): Promise<void> {
+  /** Before the server and the database connections close, so that running jobs can end. */
+  async beforeApplicationShutdown(): Promise<void> {
     if (!this.started) return;
     await this.started.catch(() => undefined);
     await this.boss.stop({ graceful: true, wait: true, timeout: STOP_TIMEOUT_MS });

@@ -1,13 +1,12 @@
-import { Inject, Injectable, type OnModuleInit } from '@nestjs/common';
+import { Injectable, type OnModuleInit } from '@nestjs/common';
 import { EntityManager } from 'typeorm';
-import { ENV } from '../config/config.module.js';
-import { type Env } from '../config/env.js';
 import { DataSheet } from '../data-sheets/data-sheet.entity.js';
 import { DataSheetVersion } from '../data-sheets/data-sheet-version.entity.js';
 import { formatNumber } from '../data-sheets/version-rules.js';
 import { jobQueue } from '../jobs/job-queue.js';
 import { JobsService } from '../jobs/jobs.service.js';
 import { MailService } from '../mail/mail.service.js';
+import { PublicAddressService } from '../mail/public-address.service.js';
 import { RegistrarService } from '../registrar/registrar.service.js';
 import { readSnapshot } from '../sheet-documents/snapshot.js';
 import { SubscriptionsService } from '../subscriptions/subscriptions.service.js';
@@ -24,7 +23,7 @@ const ARCHIVE = jobQueue<{ contentHash: string }>('release.archive', {
 @Injectable()
 export class ReleaseNoticesService implements OnModuleInit {
   constructor(
-    @Inject(ENV) private readonly env: Env,
+    private readonly addresses: PublicAddressService,
     private readonly jobs: JobsService,
     private readonly mail: MailService,
     private readonly registrar: RegistrarService,
@@ -98,7 +97,6 @@ export class ReleaseNoticesService implements OnModuleInit {
   }
 
   private addressOf(sheet: DataSheet, number: string): string {
-    const base = this.env.PUBLIC_URL ?? `http://${this.env.HOST}:${this.env.PORT}`;
-    return new URL(`/sheets/${sheet.code}/${number}`, base).toString();
+    return this.addresses.linkTo(`/sheets/${sheet.code}/${number}`);
   }
 }

@@ -252,6 +252,11 @@ const SHEETS = `
     CONSTRAINT ck_releases_sequence CHECK ((sequence = 1) = (previous_hash IS NULL)),
     CONSTRAINT ck_releases_snapshot CHECK (encode(sha256(convert_to(snapshot, 'UTF8')), 'hex') = content_hash)
   );
+  -- What has been seeded whole, so that a start that was cut short goes on where it stopped.
+  CREATE TABLE seeds (
+    name        text NOT NULL CONSTRAINT pk_seeds PRIMARY KEY,
+    finished_at timestamptz NOT NULL DEFAULT now()
+  );
   CREATE TABLE subscriptions (
     person_id     uuid NOT NULL CONSTRAINT fk_subscriptions_person REFERENCES people ON DELETE CASCADE,
     data_sheet_id uuid NOT NULL CONSTRAINT fk_subscriptions_sheet REFERENCES data_sheets ON DELETE CASCADE,
@@ -350,7 +355,7 @@ export class CreateSchema1764576000000 implements MigrationInterface {
 
   async down(db: QueryRunner): Promise<void> {
     await db.query(`
-      DROP TABLE subscriptions, releases, reviews, version_events, data_sheet_versions, data_sheets, fit_series, fits,
+      DROP TABLE seeds, subscriptions, releases, reviews, version_events, data_sheet_versions, data_sheets, fit_series, fits,
         series_events, series_points, series, files, gas_pairs, substances, api_keys, refresh_tokens, sessions,
         account_tokens, people;
       DROP FUNCTION cas_number_is_valid, refuse_change, check_release_chain, check_version_change, check_points_open;`);
