@@ -31,10 +31,17 @@ export function exactDecimal(text: string): Ratio | null {
     : ratio(digits, 10n ** BigInt(-shift));
 }
 
-/** @throws {RangeError} when the denominator is not positive */
+/** In lowest terms. @throws {RangeError} when the denominator is not positive */
 export function ratio(numerator: bigint, denominator: bigint): Ratio {
   if (denominator <= 0n) throw new RangeError('the denominator of a ratio must be positive');
-  return { numerator, denominator };
+  const divisor = greatestCommonDivisor(numerator < 0n ? -numerator : numerator, denominator);
+  return { numerator: numerator / divisor, denominator: denominator / divisor };
+}
+
+function greatestCommonDivisor(a: bigint, b: bigint): bigint {
+  let [larger, smaller] = [a, b];
+  while (smaller !== 0n) [larger, smaller] = [smaller, larger % smaller];
+  return larger === 0n ? 1n : larger;
 }
 
 /** A ratio from two decimal texts, both exact: `ratioOf('101325', '760')`. */
@@ -65,4 +72,52 @@ export function toNumber({ numerator, denominator }: Ratio): number {
   const quotient = scaled / denominator;
   const sticky = scaled % denominator === 0n ? '0' : '1';
   return Number(`${negative ? '-' : ''}${quotient}${sticky}e${-lead - 1}`);
+}
+
+/** A linear map y = (x + offset) · factor in whole numbers small enough for a double to hold each exactly. */
+interface SmallMap {
+  offsetOver: number;
+  offsetUnder: number;
+  factorOver: number;
+  factorUnder: number;
+}
+
+/**
+ * The map (x + offset) · factor on decimal texts, its results the doubles nearest to the exact ones.
+ *
+ * Where numerator and denominator of a result fit into a double each, one division rounds correctly (IEEE 754), which is
+ * some ten times faster than whole numbers of any length; tables hold a hundred thousand rows.
+ */
+export function linearMap(offset: Ratio, factor: Ratio): (decimal: string) => number | null {
+  const small: SmallMap = {
+    offsetOver: Number(offset.numerator),
+    offsetUnder: Number(offset.denominator),
+    factorOver: Number(factor.numerator),
+    factorUnder: Number(factor.denominator),
+  };
+  const isSmall = Object.values(small).every(Number.isSafeInteger);
+  return (decimal) => {
+    const quick = isSmall ? mapSmall(decimal, small) : null;
+    if (quick !== null) return quick;
+    const exact = exactDecimal(decimal);
+    return exact === null ? null : toNumber(multiply(add(exact, offset), factor));
+  };
+}
+
+const SHORT_DECIMAL = /^(-?)(\d{0,12})(?:\.(\d{0,12}))?$/;
+const POWERS_OF_TEN = Array.from({ length: 13 }, (_, power) => 10 ** power);
+
+function mapSmall(decimal: string, { offsetOver, offsetUnder, factorOver, factorUnder }: SmallMap): number | null {
+  const match = SHORT_DECIMAL.exec(decimal);
+  if (!match) return null;
+  const [, sign, whole = '', fraction = ''] = match;
+  const digits = whole + fraction;
+  const scale = POWERS_OF_TEN[fraction.length];
+  if (digits.length === 0 || digits.length > 15 || scale === undefined) return null;
+  const unscaled = (sign === '-' ? -1 : 1) * Number(digits) * offsetUnder;
+  const over = (unscaled + offsetOver * scale) * factorOver;
+  const under = scale * offsetUnder * factorUnder;
+  // A product or sum that is a safe integer was made from exact parts: doubles never come back below the limit.
+  const isExact = [unscaled, offsetOver * scale, over, under].every(Number.isSafeInteger);
+  return isExact ? over / under : null;
 }

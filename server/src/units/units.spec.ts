@@ -1,4 +1,5 @@
 import fc from 'fast-check';
+import { add, exactDecimal, multiply, toNumber } from './exact-decimal.js';
 import { UNITS } from './unit-table.js';
 import { differenceToSi, fromSi, parseUnit, toSi, unitOf, unitsOf } from './units.js';
 
@@ -40,6 +41,19 @@ describe('conversion to SI', () => {
   it('keeps the zero of a scale out of an uncertainty', () => {
     expect(differenceToSi('0.05', unitOf('°C'))).toBe(0.05);
     expect(differenceToSi('1.8', unitOf('°F'))).toBe(1);
+  });
+
+  it('rounds as whole numbers of any length do, also where it takes the short way', () => {
+    const decimals = fc
+      .tuple(fc.boolean(), fc.integer({ min: 0, max: 999_999_999 }), fc.integer({ min: 0, max: 9 }))
+      .map(([isNegative, digits, places]) => `${isNegative ? '-' : ''}${(digits / 10 ** places).toFixed(places)}`);
+    fc.assert(
+      fc.property(fc.constantFrom(...UNITS), decimals, (unit, decimal) => {
+        const exact = multiply(add(exactDecimal(decimal)!, unit.offset), unit.factor);
+        expect(toSi(decimal, unit)).toBe(toNumber(exact));
+      }),
+      { numRuns: 2000 },
+    );
   });
 
   it('comes back to the number that was typed', () => {

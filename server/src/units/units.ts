@@ -1,4 +1,4 @@
-import { add, divide, exactDecimal, multiply, subtract, toNumber, type Ratio } from './exact-decimal.js';
+import { divide, exactDecimal, linearMap, multiply, ratioOf, subtract, toNumber, type Ratio } from './exact-decimal.js';
 import { UNITS, type Unit, type UnitQuantity } from './unit-table.js';
 
 export type { Unit, UnitQuantity } from './unit-table.js';
@@ -89,18 +89,39 @@ function exact(value: number | string): Ratio {
   return read;
 }
 
+const ZERO = ratioOf('0');
+
+interface Conversions {
+  value: (decimal: string) => number | null;
+  difference: (decimal: string) => number | null;
+}
+const CONVERSIONS = new WeakMap<Unit, Conversions>();
+
+function conversionsOf(unit: Unit): Conversions {
+  const known = CONVERSIONS.get(unit);
+  if (known) return known;
+  const made = { value: linearMap(unit.offset, unit.factor), difference: linearMap(ZERO, unit.factor) };
+  CONVERSIONS.set(unit, made);
+  return made;
+}
+
+function converted(value: number | string, convert: (decimal: string) => number | null): number {
+  const result = convert(String(value));
+  if (result === null) throw new RangeError(`${value} is not a finite decimal number`);
+  return result;
+}
+
 /**
  * Converts a value to SI: the double nearest to the exact result, so 25 °C is 298.15 K to the last bit.
  *
  * @param value a finite number or its decimal text (point as decimal sign)
  * @throws {RangeError} when the value is not a finite decimal number
  */
-export const toSi = (value: number | string, unit: Unit): number =>
-  toNumber(multiply(add(exact(value), unit.offset), unit.factor));
+export const toSi = (value: number | string, unit: Unit): number => converted(value, conversionsOf(unit).value);
 
 /** Converts a difference, such as an uncertainty, to SI: the zero of the scale does not matter. */
 export const differenceToSi = (value: number | string, unit: Unit): number =>
-  toNumber(multiply(exact(value), unit.factor));
+  converted(value, conversionsOf(unit).difference);
 
 /** Converts from SI; the double nearest to the exact result. */
 export const fromSi = (value: number, unit: Unit): number =>

@@ -11,6 +11,8 @@ export class Judged {
   readonly reread: Uint8Array;
   /** rows whose D stands out and has no other reading */
   readonly far: Uint8Array;
+  /** indices of the rows in which T, P and D were read */
+  readonly complete: readonly number[];
 
   constructor(
     readonly rows: readonly TableRow[],
@@ -22,12 +24,13 @@ export class Judged {
     this.diffusivity = measured.diffusivity.slice();
     this.reread = new Uint8Array(rows.length);
     this.far = new Uint8Array(rows.length);
+    this.complete = this.findComplete();
   }
 
-  /** Indices of the rows in which T, P and D were read. */
-  get complete(): number[] {
+  /** Positive values stay positive, however they are read. */
+  private findComplete(): number[] {
     return [...this.rows.keys()].filter(
-      (i) => this.temperatureAt(i) > 0 && (this.pressure[i] ?? 0) > 0 && (this.diffusivity[i] ?? 0) > 0,
+      (i) => this.temperatureAt(i) > 0 && this.pressureAt(i) > 0 && this.diffusivityAt(i) > 0,
     );
   }
 

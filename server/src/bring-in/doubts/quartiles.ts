@@ -12,7 +12,7 @@ export interface Quartiles {
  * @returns null when there is none
  */
 export function quartiles(values: Iterable<number>): Quartiles | null {
-  const sorted = Float64Array.from([...values].filter(Number.isFinite)).sort();
+  const sorted = Float64Array.from(values).filter(Number.isFinite).sort();
   if (sorted.length === 0) return null;
   const at = (share: number): number => {
     const place = share * (sorted.length - 1);
