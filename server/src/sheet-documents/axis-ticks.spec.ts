@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import { logarithmicAxis, multiplesOf, roundStep, symmetricAxis, temperatureAxis } from './axis-ticks.js';
+import { logarithmicAxis, multiplesOf, roundStep, deviationAxis, temperatureAxis } from './axis-ticks.js';
 
 describe('figures on an axis', () => {
   it('stand at rounded temperatures', () => {
@@ -14,7 +14,8 @@ describe('figures on an axis', () => {
   });
 
   it('lie on both sides of no deviation', () => {
-    expect(symmetricAxis(5.2).ticks).toEqual([-6, -4, -2, 0, 2, 4, 6]);
+    expect(deviationAxis(-4.1, 8.3).ticks).toEqual([-6, -4, -2, 0, 2, 4, 6, 8, 10]);
+    expect(deviationAxis(0, 0).ticks).toEqual([-1, 0, 1]);
   });
 
   it('are few, ascending and inside the limits, whatever the extent', () => {

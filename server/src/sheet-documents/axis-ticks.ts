@@ -46,10 +46,11 @@ export const temperatureAxis = (minimum: number, maximum: number): FigureAxis =>
   ticks: multiplesOf(roundStep(maximum - minimum, 10), minimum, maximum),
 });
 
-/** An axis from −limit to limit or a little beyond, with figures at rounded steps. */
-export function symmetricAxis(limit: number): FigureAxis {
-  const step = roundStep(limit, 3);
-  const end = Math.max(step, step * Math.ceil(limit / step - 1e-9));
-  // Half a step of air lets the outermost figure stand clear of the edge.
-  return { minimum: -end - step / 4, maximum: end + step / 4, ticks: multiplesOf(step, -end, end) };
+/** An axis from `lower` to `upper` about zero, or a little beyond, with figures at rounded steps. */
+export function deviationAxis(lower: number, upper: number): FigureAxis {
+  const step = roundStep(upper - lower, 6);
+  const first = Math.min(-step, step * Math.floor(lower / step + 1e-9));
+  const last = Math.max(step, step * Math.ceil(upper / step - 1e-9));
+  // A quarter of a step of air lets the outermost figures stand clear of the edge.
+  return { minimum: first - step / 4, maximum: last + step / 4, ticks: multiplesOf(step, first, last) };
 }

@@ -6,6 +6,7 @@ import {
   formatQuantity,
   formatShort,
   formatSigned,
+  formatSignificant,
   formatUncertainty,
   placesFor,
 } from './format-quantity.js';
@@ -57,6 +58,11 @@ describe('numbers as the sheet prints them', () => {
     expect(formatQuantity('pressure', 101_325)).toBe('101.325\u00a0kPa');
     expect(formatQuantity('celsius', 298.15)).toBe('25\u00a0°C');
     expect(formatExtent('temperature', 283.15, 448.15)).toBe('283.15\u00a0K to 448.15\u00a0K');
+  });
+
+  it('keeps zeros that are significant', () => {
+    expect(formatSignificant(0.126, 4)).toBe('0.1260');
+    expect(formatSignificant(0.099_99, 3)).toBe('0.100');
   });
 
   it('names the day in UTC', () => {

@@ -43,6 +43,12 @@ export function formatShort(value: number, digits = 6): string {
   return formatNumber(value, Math.min(100, Math.max(0, decimals - Number(exponent))));
 }
 
+/** With so many significant digits, zeros at the end included. */
+export function formatSignificant(value: number, digits: number): string {
+  const exponent = Number(value.toExponential(digits - 1).split('e')[1]);
+  return formatNumber(value, Math.min(100, Math.max(0, digits - 1 - exponent)));
+}
+
 /** The sign always shown, except on what rounds to zero. */
 export function formatSigned(value: number, places: number): string {
   const text = formatNumber(value, places);

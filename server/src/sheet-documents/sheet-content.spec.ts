@@ -30,7 +30,7 @@ describe('content of a data sheet', () => {
       ['T0', '298.15\u00a0K', 'exact'],
       ['P0', '101.325\u00a0kPa', 'exact'],
       ['tau', '0.78\u00a0%', 'between series'],
-      ['tau_n', '0.022', 'of the exponent, between series'],
+      ['tau_n', '0.022', 'of the exponent'],
     ]);
     expect(content.correlation.coefficients.map(({ printed: text }) => text)).toEqual(['−0.388']);
   });
@@ -108,8 +108,8 @@ describe('content of a data sheet', () => {
   it('says what U is, and what it does not include', () => {
     const statement = texts(content.uncertainty.statement);
     expect(statement).toContain('expanded uncertainty of the recommended value');
-    expect(statement).toContain('k = 2.57');
-    expect(statement).toContain('level of confidence approximately 95 %');
+    expect(statement).toContain('k\u00a0=\u00a02.57');
+    expect(statement).toContain('level of confidence approximately 95\u00a0%');
     expect(statement).toContain('series h');
     const missing = texts(content.uncertainty.notIncluded);
     expect(missing).toContain('a bias common to all methods used');

@@ -1,11 +1,11 @@
 import type { EvaluableCorrelation } from '../numerics/fitting/fit.types.js';
-import { logarithmicAxis, symmetricAxis, temperatureAxis } from './axis-ticks.js';
+import { logarithmicAxis, deviationAxis, temperatureAxis } from './axis-ticks.js';
 import { newLaboratoryHalfWidths, recommendedAt } from './correlation-values.js';
 import { formatQuantity } from './format-quantity.js';
 import { estimatesAlong } from './estimates-along.js';
 import type { EstimatesAt, SeriesFacts } from './sheet-facts.js';
 import type { FigureAxis, FigureCurve, FigureEstimate, FigureSeries, SheetFigures } from './sheet-figures.types.js';
-import { seriesKey } from './sheet-series.js';
+import { extremes, seriesKey } from './sheet-series.js';
 import { sheetStrings } from './sheet-strings.js';
 import { plain, typeset } from './typeset.js';
 
@@ -80,7 +80,7 @@ function axisOfTemperatures(correlation: EvaluableCorrelation, series: readonly 
     correlation.validity.temperatureMaximum,
     ...series.flatMap((one) => one.temperatures),
   ];
-  const [lowest, highest] = [smallest(all), largest(all)];
+  const [lowest, highest] = extremes(all);
   const air = Math.max(0.04 * (highest - lowest), 0.005 * highest);
   return temperatureAxis(Math.max(lowest - air, lowest / 2), highest + air);
 }
@@ -128,26 +128,27 @@ function axisOfDiffusivities(curve: FigureCurve, series: readonly FigureSeries[]
     }),
   );
   const all = [...curve.diffusivities, ...reach];
-  const air = Math.max(1.02, (largest(all) / smallest(all)) ** 0.03);
-  return logarithmicAxis(smallest(all) / air, largest(all) * air);
+  const [lowest, highest] = extremes(all);
+  const air = Math.max(1.02, (highest / lowest) ** 0.03);
+  return logarithmicAxis(lowest / air, highest * air);
 }
 
-/** Wide enough for nineteen in twenty of the points that carried weight, and for the bands. */
+/**
+ * Wide enough for nineteen in twenty of the points that carried weight and for the bands, and for points left out that do not
+ * lie more than twice as far away.
+ */
 function axisOfDeviations(curve: FigureCurve, series: readonly FigureSeries[]): FigureAxis {
   const weighted = series
     .flatMap((one) => one.deviations.filter((_, i) => !one.leftOut.includes(i)))
     .map(Math.abs)
     .sort((a, b) => a - b);
-  const most = at(weighted, Math.floor(0.95 * (weighted.length - 1)));
+  const most = weighted[Math.floor(0.95 * (weighted.length - 1))] ?? 0;
   const inside = (column: readonly number[]): number[] => column.slice(curve.firstInside, curve.lastInside + 1);
   const bands = [
     ...inside(curve.relativeExpandedUncertainties),
     ...(curve.relativeNewLaboratory === null ? [] : inside(curve.relativeNewLaboratory)),
   ].map((part) => 100 * part);
-  return symmetricAxis(1.1 * Math.max(most || 0, largest(bands)));
+  const reach = 1.1 * Math.max(most, ...bands);
+  const shown = series.flatMap((one) => one.deviations).filter((deviation) => Math.abs(deviation) <= 2 * reach);
+  return deviationAxis(Math.min(-reach, ...extremes(shown)), Math.max(reach, ...extremes(shown)));
 }
-
-const smallest = (values: readonly number[]): number =>
-  values.reduce((a, b) => Math.min(a, b), Number.POSITIVE_INFINITY);
-const largest = (values: readonly number[]): number =>
-  values.reduce((a, b) => Math.max(a, b), Number.NEGATIVE_INFINITY);

@@ -12,7 +12,7 @@ export const sheetStrings = {
 
   lead: 'Mutual diffusivity of the dilute gas pair, *D*(*T*, *P*), from {temperature} and {pressure}, fitted to {points} in {series} by {methods}.',
   definition:
-    '*D* is the mutual (binary) diffusion coefficient of the two gases: the molar flux of one against the other, relative to the mean molar velocity, is −*c* *D* times the gradient of its mole fraction, *c* the total concentration. At low density *D*_{AB} = *D*_{BA}, so that the order of the two does not matter.',
+    '*D* is the mutual (binary) diffusion coefficient of the two gases at low density, where *D*_{AB}\u00a0=\u00a0*D*_{BA}: the order of the two does not matter.',
   points: ['point', 'points'],
   series: ['series', 'series'],
   methods: ['method of measurement', 'methods of measurement'],
@@ -44,7 +44,7 @@ export const sheetStrings = {
   fixed: 'fixed by hand',
   betweenSeries: 'between series',
   betweenSeriesAssigned: 'between series, assigned',
-  ofTheExponent: 'of the exponent, between series',
+  ofTheExponent: 'of the exponent',
 
   pressureBasis: { MEASURED: 'measured', STATED: 'stated' },
   range: 'The correlation holds from {temperature}, the extent of the points that carried weight, and from {pressure}.',
@@ -53,7 +53,7 @@ export const sheetStrings = {
   rangeMeasured: ' The range in *P* is the extent of the points.',
 
   recommendedNote:
-    'At *P* = {pressure}. From {range} multiply by ({pressure}/*P*){exponent}; the uncertainty of the factor is that of *P*.',
+    'At *P*\u00a0=\u00a0{pressure}. From {range} multiply by ({pressure}/*P*){exponent}; the uncertainty of the factor is that of *P*.',
 
   figure1:
     'Diffusivity reduced to {pressure} against temperature, both axes logarithmic. Bars are ±*u*, left away where the point hides them; open points carried no weight. Coloured axis: validity range.',
@@ -65,11 +65,11 @@ export const sheetStrings = {
     fit: 'fit {number}',
     band: '*U* of the recommended value',
     newLaboratory: 'interval for one new laboratory',
-    leftOut: 'left out',
+    leftOut: '{key}, left out',
     validity: 'validity range',
   },
   axes: {
-    diffusivity: '*D* / (cm²/s) at *P* = {pressure}',
+    diffusivity: '*D* / (cm²/s) at *P*\u00a0=\u00a0{pressure}',
     temperature: '*T* / K',
     deviation: '100 (*D*/*D*(fit) − 1)',
   },
@@ -117,12 +117,12 @@ export const sheetStrings = {
     'No estimate is shown: a constant that the methods need is missing, or they do not reach these temperatures.',
 
   expanded:
-    '*u* is standard uncertainty. *U* is the expanded uncertainty of the recommended value, *U* = *k u* with *k* = {k}, level of confidence approximately 95 %{basis}.',
-  studentBasis: ' (Student’s *t* with ν = {degrees})',
+    '*u* is standard uncertainty. *U* is the expanded uncertainty of the recommended value, *U*\u00a0=\u00a0*k\u00a0u* with *k*\u00a0=\u00a0{k}, level of confidence approximately 95\u00a0%{basis}.',
+  studentBasis: ' (Student’s *t* with ν\u00a0=\u00a0{degrees})',
   normalBasis: ' (normal distribution)',
   newLaboratory:
     'The interval for one new laboratory adds the scatter between series. It is a prediction of what another laboratory would find, not the uncertainty of *D*.',
-  assignedScatter: 'Too few series to estimate the scatter between laboratories: τ = {tau} was assigned.',
+  assignedScatter: 'Too few series to estimate the scatter between laboratories: τ\u00a0=\u00a0{tau} was assigned.',
   assignedUncertainty:
     'Where a source states no uncertainty, the usual value of its method was assigned: series {keys}.',
   biasNotIncluded: 'Not included: a bias common to all methods used.',
@@ -176,7 +176,7 @@ export const sheetStrings = {
     releasedBy: 'Released by',
     fit: 'Fit {number}, {date}. {objective}, {weighting}; {effect}.',
     engine: 'Engine {engine}.',
-    residual: 'Reduced χ² = {value}, ν = {degrees}.',
+    residual: 'Reduced χ²\u00a0=\u00a0{value}, ν\u00a0=\u00a0{degrees}.',
     allPoints: 'All {count} points are drawn. Filled points carried weight, open points did not.',
     offsets: 'Offset: mean deviation of ln *D* from the correlation, in percent, and its standard uncertainty.',
   },

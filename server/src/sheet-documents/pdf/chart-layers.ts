@@ -111,7 +111,13 @@ export function pointLayers(mark: number, points: readonly ChartPoint[]): Custom
   return [bars, marks];
 }
 
-/** A point beyond the scale: an arrow in its colour at the edge, with its value. */
+/** Room that the value of a point beyond the scale takes, px */
+const BEYOND_LABEL_WIDTH = 34;
+
+/**
+ * Points beyond the scale on one side, ascending in x: an arrow in their colour at the edge, and the value to its right where the
+ * next arrow leaves room for it.
+ */
 export const beyondLayer = (
   mark: number,
   points: readonly { readonly x: number; readonly edge: number; readonly isAbove: boolean; readonly text: string }[],
@@ -120,6 +126,8 @@ export const beyondLayer = (
     const point = points[i];
     if (point === undefined) return null;
     const [x, y] = place(point.x, point.edge);
+    const next = points[i + 1];
+    const hasRoom = next === undefined || place(next.x, next.edge)[0] - x > BEYOND_LABEL_WIDTH;
     const down = point.isAbove ? 7 : -7;
     const { colour } = seriesMark(mark);
     return {
@@ -140,7 +148,7 @@ export const beyondLayer = (
           type: 'text',
           x: x + 7,
           y: y + down / 2,
-          style: { text: point.text, fill: printPalette.ink2, fontSize: 10, verticalAlign: 'middle' },
+          style: { text: hasRoom ? point.text : '', fill: printPalette.ink2, fontSize: 10, verticalAlign: 'middle' },
         },
       ],
     };

@@ -45,6 +45,7 @@ export function diffusivityChart(figures: SheetFigures, fitLabel: string, height
       bandLayer(1, band(1), band(-1)),
       ...curveLayers(curve, line),
       ...figures.series.flatMap((series) => pointLayers(series.mark, diffusivityPoints(series))),
+      ...figures.series.filter((series) => !series.used).map(leftOutLabel),
       labelLayer(fitLabel, middle[0], middle[1], { dx: 10, dy: 14, colour: printPalette.accent, align: 'left' }),
       labelLayer(sheetStrings.figureKeys.validity, Math.log(validityOf(figures)[0]), bottom, {
         dx: 3,
@@ -53,6 +54,18 @@ export function diffusivityChart(figures: SheetFigures, fitLabel: string, height
         align: 'left',
       }),
     ],
+  });
+}
+
+/** A series left out is named at its last point. */
+function leftOutLabel(series: FigureSeries): CustomSeriesOption {
+  const last = series.temperatures.reduce((best, T, i) => (T > (series.temperatures[best] ?? 0) ? i : best), 0);
+  const text = sheetStrings.figureKeys.leftOut.replace('{key}', series.key);
+  return labelLayer(text, Math.log(series.temperatures[last] ?? 1), Math.log(series.reducedDiffusivities[last] ?? 1), {
+    dx: -8,
+    dy: -4,
+    colour: printPalette.ink2,
+    align: 'right',
   });
 }
 
@@ -191,13 +204,16 @@ function deviationLayers(series: FigureSeries, axis: FigureAxis): CustomSeriesOp
     return { x: Math.log(T), y, low, high: Math.min(axis.maximum, y + u), isOpen: leftOut.has(i) };
   });
   const isInside = ({ y }: ChartPoint): boolean => y >= axis.minimum && y <= axis.maximum;
-  const beyond = points
-    .filter((point) => !isInside(point))
-    .map(({ x, y }) => {
-      const isAbove = y > axis.maximum;
-      return { x, edge: isAbove ? axis.maximum : axis.minimum, isAbove, text: formatSigned(y, 1) };
-    });
-  return [...pointLayers(series.mark, points.filter(isInside)), beyondLayer(series.mark, beyond)];
+  const beyond = (isAbove: boolean) =>
+    points
+      .filter(({ y }) => (isAbove ? y > axis.maximum : y < axis.minimum))
+      .sort((a, b) => a.x - b.x)
+      .map(({ x, y }) => ({ x, edge: isAbove ? axis.maximum : axis.minimum, isAbove, text: formatSigned(y, 1) }));
+  return [
+    ...pointLayers(series.mark, points.filter(isInside)),
+    beyondLayer(series.mark, beyond(true)),
+    beyondLayer(series.mark, beyond(false)),
+  ];
 }
 
 function decimalsOf(value: number): number {

@@ -1,6 +1,6 @@
 /** The part of fontkit that is used here; the package ships no types. */
 declare module 'fontkit' {
-  interface FontkitFont {
+  export interface FontkitFont {
     readonly unitsPerEm: number;
     layout(text: string, features?: readonly string[]): { readonly advanceWidth: number };
     hasGlyphForCodePoint(codePoint: number): boolean;

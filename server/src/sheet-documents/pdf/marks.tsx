@@ -59,7 +59,7 @@ export function StateMark({ status, word }: { readonly status: string; readonly 
 /** Colour and shape of a series: filled where it carries weight, open where it was left out. */
 export function SeriesMarkKey({ mark, isOpen }: { readonly mark: number; readonly isOpen: boolean }) {
   const { colour, path } = seriesMark(mark);
-  const look = isOpen ? { fill: printPalette.paper, stroke: colour, strokeWidth: 0.42 } : { fill: colour };
+  const look = isOpen ? { fill: printPalette.paper, stroke: colour, strokeWidth: 0.32 } : { fill: colour };
   return (
     <Svg width={9} height={9} viewBox="-1.8 -1.8 3.6 3.6">
       <Path d={path} {...look} />

@@ -15,7 +15,7 @@ import { VectorChart } from './vector-chart.js';
 const { axes, figureKeys } = sheetStrings;
 const MARGIN_SIZE = 7.8;
 const CAPTION_SIZE = 8.2;
-const HEIGHTS = { diffusivity: 360, deviation: 262 } as const;
+const HEIGHTS = { diffusivity: 330, deviation: 244 } as const;
 
 const fitLabelOf = ({ margin }: SheetContent): string => figureKeys.fit.replace('{number}', margin.fitNumber);
 
@@ -85,7 +85,7 @@ function FigureKeys({ content, fitLabel }: { readonly content: SheetContent; rea
     <View style={styles.keys}>
       {series.map(({ key, mark, title, used }) => (
         <Key key={key} mark={<SeriesMarkKey mark={mark} isOpen={!used} />}>
-          {`${key}, ${title}${used ? '' : `, ${figureKeys.leftOut}`}`}
+          {used ? `${key}, ${title}` : figureKeys.leftOut.replace('{key}', () => `${key}, ${title}`)}
         </Key>
       ))}
       <View style={{ height: 4 }} />

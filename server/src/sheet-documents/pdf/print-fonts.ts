@@ -40,6 +40,13 @@ export const PRINT_FAMILIES: string[] = Object.keys(FAMILIES);
 export const workSansFile = (fontWeight: 400 | 600): string =>
   fileOf('work-sans', `work-sans-latin-${fontWeight}-normal`);
 
+/** The upright, regular cut of each family, in the order in which glyphs are looked for. */
+export const upright = (): string[] =>
+  Object.values(FAMILIES).flatMap((fonts) => {
+    const cut = fonts.find(({ fontWeight = 400, fontStyle }) => fontWeight === 400 && fontStyle === 'normal');
+    return cut === undefined ? [] : [cut.src];
+  });
+
 /** Makes the fonts known to the renderer; every time the same, so it may be repeated. */
 export function registerPrintFonts(): void {
   for (const [family, fonts] of Object.entries(FAMILIES)) Font.register({ family, fonts: [...fonts] });

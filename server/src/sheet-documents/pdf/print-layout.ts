@@ -24,7 +24,9 @@ const MARGIN_WIDTH = millimetres(40);
 
 /** Styles of the printed sheet, in pt. */
 export const styles = StyleSheet.create({
-  page: { fontFamily: PRINT_FAMILIES, fontSize: 9.4, lineHeight: 1.42, color: printPalette.ink },
+  // No line height here and in the footer: fixed text with one is lost by the renderer. Elsewhere it stands beside its font
+  // size, of which it is a multiple; alone it would be a multiple of the renderer's 18 pt.
+  page: { fontFamily: PRINT_FAMILIES, fontSize: 9.4, color: printPalette.ink },
   masthead: {
     flexDirection: 'row',
     justifyContent: 'space-between',
@@ -47,7 +49,7 @@ export const styles = StyleSheet.create({
     marginBottom: 14,
   },
 
-  row: { flexDirection: 'row', marginBottom: 16 },
+  row: { flexDirection: 'row', marginBottom: 13 },
   column: { width: COLUMN_WIDTH, marginRight: GUTTER },
   margin: {
     width: MARGIN_WIDTH,
@@ -60,7 +62,7 @@ export const styles = StyleSheet.create({
   },
   marginEmpty: { width: MARGIN_WIDTH },
   marginLine: { flexDirection: 'row' },
-  marginLabel: { width: millimetres(16), color: printPalette.ink3 },
+  marginLabel: { width: millimetres(18), paddingRight: 4, color: printPalette.ink3 },
   marginValue: { flex: 1, color: printPalette.ink },
   marginParagraph: { marginBottom: 4 },
 
@@ -71,12 +73,13 @@ export const styles = StyleSheet.create({
   small: { fontSize: 8.4, lineHeight: 1.42, color: printPalette.ink2 },
 
   heading: { flexDirection: 'row', marginBottom: 6 },
-  headingNumber: { fontSize: 11, color: printPalette.ink3, width: 14 },
-  headingText: { fontSize: 11, fontWeight: 600 },
+  headingNumber: { fontSize: 11, lineHeight: 1.3, color: printPalette.ink3, width: 14 },
+  headingText: { fontSize: 11, lineHeight: 1.3, fontWeight: 600 },
   caption: { fontSize: 8.2, lineHeight: 1.41, color: printPalette.ink2, marginTop: 4 },
   axisTitle: { fontSize: 8.2, lineHeight: 1.3 },
   remark: {
     fontSize: 8.4,
+    lineHeight: 1.42,
     color: printPalette.ink2,
     borderLeftWidth: 0.8,
     borderLeftColor: printPalette.rule,
@@ -91,8 +94,8 @@ export const styles = StyleSheet.create({
   exponent: { fontSize: 11.5, alignSelf: 'flex-start', marginTop: -5, marginRight: 4 },
   parameters: { fontSize: 9, lineHeight: 1.49 },
   parameter: { flexDirection: 'row' },
-  parameterLabel: { width: 44, textAlign: 'right' },
-  parameterSign: { width: 18, textAlign: 'center' },
+  parameterLabel: { width: 44, flexShrink: 0, textAlign: 'right' },
+  parameterSign: { width: 18, flexShrink: 0, textAlign: 'center' },
 
   table: { fontSize: 8.4, lineHeight: 1.31, borderTopWidth: 1, borderBottomWidth: 1, borderColor: printPalette.ink },
   tableHead: {
@@ -121,13 +124,19 @@ export const styles = StyleSheet.create({
   keyMark: { width: 19, height: 10, marginTop: 0.8 },
   keyText: { flex: 1 },
 
-  paragraph: { marginBottom: 4 },
+  paragraph: { marginBottom: 2.5 },
   caution: { flexDirection: 'row', fontSize: 9, lineHeight: 1.4, marginBottom: 2.2 },
   cautionMark: { width: 15.5, color: printPalette.warn },
   cautionText: { flex: 1 },
-  citation: { borderLeftWidth: 0.8, borderLeftColor: printPalette.ink3, paddingLeft: 11 },
+  citation: {
+    fontSize: 9.4,
+    lineHeight: 1.42,
+    borderLeftWidth: 0.8,
+    borderLeftColor: printPalette.ink3,
+    paddingLeft: 11,
+  },
 
-  footer: { position: 'absolute', flexDirection: 'row', fontSize: 7.5, lineHeight: 1.3, color: printPalette.ink2 },
+  footer: { position: 'absolute', flexDirection: 'row', fontSize: 7.5, color: printPalette.ink2 },
   footerName: { width: millimetres(64) },
   footerHash: { flex: 1 },
   footerPage: { width: millimetres(30), textAlign: 'right' },

@@ -46,10 +46,12 @@ export function PrintTable({ columns, rows, more = [], isLong = false }: PrintTa
     <View style={styles.table}>
       <View style={styles.tableHead} wrap={false}>
         {columns.map((column, i) => (
-          <Text key={i} style={cellStyle(column, i === columns.length - 1)}>
-            <Runs runs={column.head} size={7.8} />
-            {column.unit !== '' && <Text style={styles.tableUnit}>{`\n${column.unit}`}</Text>}
-          </Text>
+          <View key={i} style={cellStyle(column, i === columns.length - 1)}>
+            <Text>
+              <Runs runs={column.head} size={7.8} />
+            </Text>
+            {column.unit !== '' && <Text style={styles.tableUnit}>{column.unit}</Text>}
+          </View>
         ))}
       </View>
       {rows.map((row, i) => (

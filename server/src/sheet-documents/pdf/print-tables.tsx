@@ -5,6 +5,7 @@ import {
   formatQuantity,
   formatShort,
   formatSigned,
+  formatSignificant,
   formatUncertainty,
   inPrintedUnit,
   placesFor,
@@ -140,7 +141,7 @@ export function ExcludedPointsTable({ content }: { readonly content: SheetConten
         seriesKey,
         formatShort(temperature),
         formatShort(inPrintedUnit('pressure', pressure)),
-        formatShort(inPrintedUnit('diffusivity', diffusivity), 4),
+        formatSignificant(inPrintedUnit('diffusivity', diffusivity), 4),
         formatSigned(deviation, 1),
         reason,
       ],
@@ -168,7 +169,7 @@ export function EstimatesTable({ content }: { readonly content: SheetContent }) 
       method,
       ...diffusivities.flatMap((D, i) => [
         // An estimate has no uncertainty of its own; four digits are more than it deserves.
-        formatShort(inPrintedUnit('diffusivity', D), 4),
+        formatSignificant(inPrintedUnit('diffusivity', D), 4),
         formatSigned(deviations[i] ?? Number.NaN, 1),
       ]),
       formatShort(usualMeanError, 2),

@@ -2,6 +2,7 @@ import { renderToBuffer } from '@react-pdf/renderer';
 import type { SheetContent } from '../sheet-content.types.js';
 import { registerPrintFonts } from './print-fonts.js';
 import type { Paper } from './print-layout.js';
+import { printable } from './printable.js';
 import { SheetDocument } from './sheet-document.js';
 
 export type { Paper } from './print-layout.js';
@@ -13,5 +14,5 @@ export type { Paper } from './print-layout.js';
  */
 export async function renderSheetPdf(content: SheetContent, paper: Paper = 'A4'): Promise<Buffer> {
   registerPrintFonts();
-  return renderToBuffer(<SheetDocument content={content} paper={paper} />);
+  return renderToBuffer(<SheetDocument content={printable(content)} paper={paper} />);
 }

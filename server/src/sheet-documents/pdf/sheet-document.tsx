@@ -171,8 +171,10 @@ function CorrelationSection({ content }: ContentProps) {
   );
 }
 
+const STATED_BESIDE_TABLE = 2;
+
 function RecommendedSection({ content }: ContentProps) {
-  const notes = [...content.uncertainty.statement.slice(0, 2), content.recommended.note];
+  const notes = [content.recommended.note, ...content.uncertainty.statement.slice(0, STATED_BESIDE_TABLE)];
   return (
     <PrintSection content={content} id="recommended" margin={<Paragraphs paragraphs={notes} size={7.8} />}>
       <RecommendedTable content={content} />
@@ -218,10 +220,11 @@ function EstimatesSection({ content }: ContentProps) {
 }
 
 function UncertaintySection({ content }: ContentProps) {
+  // The first two paragraphs stand beside the table they explain.
   const { statement, notIncluded } = content.uncertainty;
   return (
     <PrintSection content={content} id="uncertainty">
-      {[...statement, ...notIncluded].map((runs, i) => (
+      {[...statement.slice(STATED_BESIDE_TABLE), ...notIncluded].map((runs, i) => (
         <Text key={i} style={[styles.small, styles.paragraph]}>
           <Runs runs={runs} size={8.4} />
         </Text>
@@ -255,9 +258,12 @@ function CitationSection({ content }: ContentProps) {
   );
 }
 
+/** A longer table is parted between two pages. */
+const MOST_ROWS_TOGETHER = 12;
+
 function VersionsSection({ content }: ContentProps) {
   return (
-    <PrintSection content={content} id="versions" wrap>
+    <PrintSection content={content} id="versions" wrap={content.versions.length > MOST_ROWS_TOGETHER}>
       <VersionsTable content={content} />
     </PrintSection>
   );
