@@ -2,7 +2,7 @@ import 'reflect-metadata';
 import fastifyCookie from '@fastify/cookie';
 import fastifyHelmet from '@fastify/helmet';
 import fastifyMultipart from '@fastify/multipart';
-import { type LogLevel, type LoggerService } from '@nestjs/common';
+import { ConsoleLogger, type LogLevel, type LoggerService } from '@nestjs/common';
 import { NestFactory } from '@nestjs/core';
 import { FastifyAdapter, type NestFastifyApplication } from '@nestjs/platform-fastify';
 import { AppModule } from './app.module.js';
@@ -42,15 +42,20 @@ const LOG_LEVELS: Record<Env['LOG_LEVEL'], LogLevel[]> = {
   debug: ['fatal', 'error', 'warn', 'log', 'debug'],
 };
 
+/** One line of JSON an entry, on stderr: stdout is for the launcher's own words. */
+function jsonLogger(level: Env['LOG_LEVEL']): LoggerService {
+  return new ConsoleLogger({ json: true, colors: false, compact: true, logLevels: LOG_LEVELS[level] });
+}
+
 /** The whole server, ready to listen. Tests and the start command build it the same way. */
-export async function createApp(env: Env, logger?: LoggerService): Promise<NestFastifyApplication> {
+export async function createApp(env: Env): Promise<NestFastifyApplication> {
   const adapter = new FastifyAdapter({
     bodyLimit: BODY_LIMIT_BYTES,
     requestTimeout: REQUEST_TIMEOUT_MS,
     trustProxy: false,
   });
   const app = await NestFactory.create<NestFastifyApplication>(AppModule.with(env), adapter, {
-    logger: logger ?? LOG_LEVELS[env.LOG_LEVEL],
+    logger: jsonLogger(env.LOG_LEVEL),
     abortOnError: false,
   });
   await app.register(fastifyCookie);

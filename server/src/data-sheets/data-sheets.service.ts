@@ -1,10 +1,11 @@
 import { Injectable } from '@nestjs/common';
 import { DataSource, In } from 'typeorm';
+import { cachedBatch } from '../common/cached-batch.js';
 import { type Page } from '../common/graphql/connection.js';
 import { isOfTheGroup, type Viewer } from '../common/viewer.js';
 import { DataSheet } from './data-sheet.entity.js';
 import { DataSheetVersion, type VersionEvent } from './data-sheet-version.entity.js';
-import { isReleased, parseNumber, STATES_OF_RELEASED } from './version-rules.js';
+import { isReleased, parseNumber } from './version-rules.js';
 
 const HAS_A_RELEASE = `EXISTS (SELECT FROM data_sheet_versions v
   WHERE v.data_sheet_id = d.id AND v.status IN ('RELEASED', 'SUPERSEDED', 'WITHDRAWN'))`;
@@ -13,6 +14,10 @@ const HAS_A_RELEASE = `EXISTS (SELECT FROM data_sheet_versions v
 const SEARCHED_TEXT = `lower(d.code || ' ' || a.name || ' ' || a.formula || ' ' || array_to_string(a.synonyms, ' ') || ' '
   || coalesce(a.cas_number, '') || ' ' || b.name || ' ' || b.formula || ' ' || array_to_string(b.synonyms, ' ') || ' '
   || coalesce(b.cas_number, ''))`;
+
+const SHEETS_REMEMBERED = 2_000;
+/** How long another process's change may go unseen, ms. */
+const TRUSTED_MS = 1_000;
 
 /** Newest first. */
 const BY_NUMBER = { edition: 'DESC', revision: 'DESC', createdAt: 'DESC' } as const;
@@ -37,12 +42,21 @@ export class DataSheetsService {
   };
 
   /** Batch function for `loaderFor`: every version of each sheet, newest first, whoever asks. */
-  readonly versionsBySheet = async (sheetIds: readonly string[]): Promise<DataSheetVersion[][]> => {
-    const found = await this.dataSource
-      .getRepository(DataSheetVersion)
-      .find({ where: { dataSheetId: In([...sheetIds]) }, order: BY_NUMBER });
-    return sheetIds.map((id) => found.filter((version) => version.dataSheetId === id));
-  };
+  readonly versionsBySheet = cachedBatch<DataSheetVersion[]>(
+    { max: SHEETS_REMEMBERED, ttl: TRUSTED_MS },
+    async (sheetIds) => {
+      const found = await this.dataSource
+        .getRepository(DataSheetVersion)
+        .find({ where: { dataSheetId: In([...sheetIds]) }, order: BY_NUMBER });
+      return sheetIds.map((id) => found.filter((version) => version.dataSheetId === id));
+    },
+  );
+
+  /** Sheets by code; a sheet itself never changes, so it is remembered. */
+  private readonly byCode = cachedBatch<DataSheet>({ max: SHEETS_REMEMBERED }, async (codes) => {
+    const found = await this.dataSource.getRepository(DataSheet).findBy({ code: In([...codes]) });
+    return codes.map((code) => found.find((sheet) => sheet.code === code) ?? new Error(`no data sheet ${code}`));
+  });
 
   /** Batch function for `loaderFor`: versions by id, whoever asks. */
   readonly versionsByIds = async (ids: readonly string[]): Promise<(DataSheetVersion | Error)[]> => {
@@ -83,8 +97,14 @@ export class DataSheetsService {
   }
 
   async findByCode(code: string, viewer: Viewer | null): Promise<DataSheet | null> {
-    const sheet = await this.dataSource.getRepository(DataSheet).findOneBy({ code: code.trim().toUpperCase() });
-    return sheet && (isOfTheGroup(viewer) || (await this.hasRelease(sheet.id))) ? sheet : null;
+    const [sheet] = await this.byCode([code.trim().toUpperCase()]);
+    if (!sheet || sheet instanceof Error) return null;
+    return isOfTheGroup(viewer) || (await this.hasRelease(sheet.id)) ? sheet : null;
+  }
+
+  /** Drops what is remembered of a sheet's versions, after one has changed. */
+  forget(sheetId: string): void {
+    this.versionsBySheet.forget(sheetId);
   }
 
   /** The one of `versions` with this number that the viewer may see; a released one before a draft of the same number. */
@@ -115,8 +135,7 @@ export class DataSheetsService {
   }
 
   private async hasRelease(sheetId: string): Promise<boolean> {
-    return this.dataSource
-      .getRepository(DataSheetVersion)
-      .existsBy({ dataSheetId: sheetId, status: In([...STATES_OF_RELEASED]) });
+    const [versions] = await this.versionsBySheet([sheetId]);
+    return Array.isArray(versions) && versions.some((version) => isReleased(version.status));
   }
 }

@@ -7,6 +7,7 @@ import { type Viewer } from '../common/viewer.js';
 import { Fit } from '../fits/fit.entity.js';
 import { type StatedPressureRangeInput, type DraftDataSheetInput, type UpdateDraftInput } from './data-sheet.input.js';
 import { DataSheet } from './data-sheet.entity.js';
+import { DataSheetsService } from './data-sheets.service.js';
 import { DataSheetVersion, type StatedPressureRange } from './data-sheet-version.entity.js';
 import { correlationOfVersion } from './version-correlation.js';
 import {
@@ -47,11 +48,14 @@ function remarkProblems(input: UpdateDraftInput): Problem[] {
 /** Preparing versions: drafting from a fit, editing words, handing in for review. */
 @Injectable()
 export class DraftingService {
-  constructor(private readonly dataSource: DataSource) {}
+  constructor(
+    private readonly dataSource: DataSource,
+    private readonly sheets: DataSheetsService,
+  ) {}
 
   /** @throws {ApiError} NOT_FOUND for a fit that is not there */
   draft(input: DraftDataSheetInput, viewer: Viewer): Promise<Outcome<DataSheetVersion>> {
-    return this.dataSource.transaction(async (tx) => {
+    return this.write(async (tx) => {
       const fit = isId(input.fitId) ? await tx.findOneBy(Fit, { id: input.fitId }) : null;
       if (!fit) throw new ApiError('NOT_FOUND', 'There is no such fit.');
       const sheet = await this.sheetOf(tx, fit.pairId);
@@ -79,7 +83,7 @@ export class DraftingService {
 
   /** @throws {ApiError} NOT_FOUND, or CONFLICT when somebody changed the draft meanwhile */
   update(input: UpdateDraftInput, viewer: Viewer): Promise<Outcome<DataSheetVersion>> {
-    return this.dataSource.transaction(async (tx) => {
+    return this.write(async (tx) => {
       const version = await this.lock(tx, input.versionId, input.lockVersion);
       const last = await this.lastReleased(tx, version.dataSheetId);
       const words = { summary: input.summary, changeNote: input.changeNote ?? null };
@@ -109,7 +113,7 @@ export class DraftingService {
 
   /** @throws {ApiError} NOT_FOUND */
   submit(versionId: string, viewer: Viewer): Promise<Outcome<DataSheetVersion>> {
-    return this.dataSource.transaction(async (tx) => {
+    return this.write(async (tx) => {
       const version = await this.lock(tx, versionId);
       const problems = transitionProblems('submit', { ...version, seriesOwnerIds: [] }, viewer.id);
       if (problems.length > 0) return refused(...problems);
@@ -118,6 +122,15 @@ export class DraftingService {
       await this.record(tx, saved, 'submit', null, viewer);
       return accepted(saved);
     });
+  }
+
+  /** One transaction; what readers are remembered to see of the sheet is dropped once it has committed. */
+  private async write(
+    work: (tx: EntityManager) => Promise<Outcome<DataSheetVersion>>,
+  ): Promise<Outcome<DataSheetVersion>> {
+    const outcome = await this.dataSource.transaction(work);
+    if (outcome.ok) this.sheets.forget(outcome.value.dataSheetId);
+    return outcome;
   }
 
   /**
@@ -197,7 +210,10 @@ export class DraftingService {
   }
 
   private async sheetOf(tx: EntityManager, pairId: string): Promise<DataSheet> {
-    await tx.query('INSERT INTO data_sheets (pair_id) VALUES ($1) ON CONFLICT DO NOTHING', [pairId]);
+    // Looked up first: an insert that finds the sheet there would use up a number all the same.
+    if (!(await tx.existsBy(DataSheet, { pairId }))) {
+      await tx.query('INSERT INTO data_sheets (pair_id) VALUES ($1) ON CONFLICT DO NOTHING', [pairId]);
+    }
     // The sheet's row serialises its drafts, so that their numbers follow one another.
     return tx.findOneOrFail(DataSheet, { where: { pairId }, lock: LOCK });
   }

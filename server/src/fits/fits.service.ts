@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { DataSource, EntityManager, In } from 'typeorm';
 import { ApiError } from '../common/api-error.js';
+import { cachedBatch } from '../common/cached-batch.js';
 import { isId } from '../common/graphql/node.js';
 import { accepted, type Outcome, refused } from '../common/problem.js';
 import { isOfTheGroup, type Viewer } from '../common/viewer.js';
@@ -18,6 +19,8 @@ import { type FitAnalysis } from './fit.types.js';
 
 /** From this many series on, τ is estimated and tells something about the group. */
 const SERIES_THAT_SHOW_SCATTER = 3;
+
+const FITS_REMEMBERED = 500;
 
 interface Computation {
   pair: GasPair;
@@ -43,12 +46,12 @@ export class FitsService {
     private readonly pointsStore: SeriesPointsStore,
   ) {}
 
-  /** Batch function for `loaderFor`: one entry per id, in the order asked. */
-  readonly byIds = async (ids: readonly string[]): Promise<(Fit | Error)[]> => {
+  /** Batch function for `loaderFor`: one entry per id, in the order asked. A fit never changes, so it is remembered. */
+  readonly byIds = cachedBatch<Fit>({ max: FITS_REMEMBERED }, async (ids) => {
     const found = await this.dataSource.getRepository(Fit).findBy({ id: In([...ids]) });
     const byId = new Map(found.map((fit) => [fit.id, fit]));
     return ids.map((id) => byId.get(id) ?? new Error(`no fit ${id}`));
-  };
+  });
 
   /** Batch function for `loaderFor`: ids of the series each fit used. */
   readonly seriesIdsByFit = async (fitIds: readonly string[]): Promise<string[][]> => {

@@ -1,10 +1,13 @@
 import { Injectable } from '@nestjs/common';
 import { DataSource, EntityManager, In } from 'typeorm';
+import { cachedBatch } from '../common/cached-batch.js';
 import { type Page } from '../common/graphql/connection.js';
 import { type Outcome, accepted, problem, refused } from '../common/problem.js';
 import { type SubstanceRef } from '../substances/substance.input.js';
 import { SubstancesService } from '../substances/substances.service.js';
 import { GasPair } from './gas-pair.entity.js';
+
+const PAIRS_REMEMBERED = 5_000;
 
 @Injectable()
 export class PairsService {
@@ -13,12 +16,12 @@ export class PairsService {
     private readonly substances: SubstancesService,
   ) {}
 
-  /** Batch function for `loaderFor`: one entry per id, in the order asked. */
-  readonly byIds = async (ids: readonly string[]): Promise<(GasPair | Error)[]> => {
+  /** Batch function for `loaderFor`: one entry per id, in the order asked. A pair never changes, so it is remembered. */
+  readonly byIds = cachedBatch<GasPair>({ max: PAIRS_REMEMBERED }, async (ids) => {
     const found = await this.dataSource.getRepository(GasPair).findBy({ id: In([...ids]) });
     const byId = new Map(found.map((pair) => [pair.id, pair]));
     return ids.map((id) => byId.get(id) ?? new Error(`no pair ${id}`));
-  };
+  });
 
   /** The pair of two substances in either order, or null. */
   async find(a: SubstanceRef, b: SubstanceRef): Promise<GasPair | null> {

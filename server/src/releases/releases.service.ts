@@ -1,6 +1,7 @@
 import { Inject, Injectable } from '@nestjs/common';
 import { DataSource, EntityManager, In, Not } from 'typeorm';
 import { ApiError } from '../common/api-error.js';
+import { cachedBatch } from '../common/cached-batch.js';
 import { accepted, type Outcome, problem, refused } from '../common/problem.js';
 import { type Viewer } from '../common/viewer.js';
 import { ENV } from '../config/config.module.js';
@@ -8,6 +9,7 @@ import { type Env } from '../config/env.js';
 import { PasswordsService } from '../auth/passwords.service.js';
 import { DataSheet } from '../data-sheets/data-sheet.entity.js';
 import { DataSheetVersion } from '../data-sheets/data-sheet-version.entity.js';
+import { DataSheetsService } from '../data-sheets/data-sheets.service.js';
 import { DraftingService } from '../data-sheets/drafting.service.js';
 import { formatNumber, statusAfter, transitionProblems } from '../data-sheets/version-rules.js';
 import { Fit } from '../fits/fit.entity.js';
@@ -20,6 +22,8 @@ import { SheetFactsService } from './sheet-facts.service.js';
 /** Any number; whoever holds the lock writes the next link of the chain. */
 const CHAIN_LOCK = 428_001;
 
+const RELEASES_REMEMBERED = 500;
+
 /** Why other open versions of a sheet go back when one is released. */
 const OVERTAKEN = 'Another version was released meanwhile; check this one against it.';
 
@@ -28,6 +32,7 @@ export class ReleasesService {
   constructor(
     @Inject(ENV) private readonly env: Env,
     private readonly dataSource: DataSource,
+    private readonly sheets: DataSheetsService,
     private readonly drafting: DraftingService,
     private readonly passwords: PasswordsService,
     private readonly facts: SheetFactsService,
@@ -35,11 +40,18 @@ export class ReleasesService {
   ) {}
 
   /** Batch function for `loaderFor`: the release of each version, or null. */
-  readonly byVersions = async (versionIds: readonly string[]): Promise<(Release | null)[]> => {
-    const found = await this.dataSource.getRepository(Release).findBy({ versionId: In([...versionIds]) });
-    const byVersion = new Map(found.map((release) => [release.versionId, release]));
-    return versionIds.map((id) => byVersion.get(id) ?? null);
-  };
+  readonly byVersions = async (versionIds: readonly string[]): Promise<(Release | null | Error)[]> =>
+    (await this.remembered(versionIds)).map((row) => (row instanceof Error ? row : row.release));
+
+  /** A release never changes; that there is none yet may. */
+  private readonly remembered = cachedBatch<{ release: Release | null }>(
+    { max: RELEASES_REMEMBERED, keep: ({ release }) => release !== null },
+    async (versionIds) => {
+      const found = await this.dataSource.getRepository(Release).findBy({ versionId: In([...versionIds]) });
+      const byVersion = new Map(found.map((release) => [release.versionId, release]));
+      return versionIds.map((id) => ({ release: byVersion.get(id) ?? null }));
+    },
+  );
 
   /**
    * Freezes an approved version as the sheet's next, or says why it may not be.
@@ -56,7 +68,7 @@ export class ReleasesService {
     if (!(await this.passwords.verifyPassword(viewer.id, password))) {
       return refused(problem('WRONG_PASSWORD', 'This is not your password.', 'password'));
     }
-    return this.dataSource.transaction(async (tx) => {
+    const outcome = await this.dataSource.transaction(async (tx) => {
       await tx.query('SELECT pg_advisory_xact_lock($1)', [CHAIN_LOCK]);
       const sheet = await tx.findOneOrFail(DataSheet, {
         where: { id: seen.dataSheetId },
@@ -78,6 +90,8 @@ export class ReleasesService {
       await this.notices.released(tx, { sheet, version: saved, release, earlier });
       return accepted(saved);
     });
+    this.sheets.forget(seen.dataSheetId);
+    return outcome;
   }
 
   /** @throws {ApiError} NOT_FOUND, or CONFLICT when somebody acted on the version meanwhile */
@@ -93,7 +107,7 @@ export class ReleasesService {
     if (!(await this.passwords.verifyPassword(viewer.id, password))) {
       return refused(problem('WRONG_PASSWORD', 'This is not your password.', 'password'));
     }
-    return this.dataSource.transaction(async (tx) => {
+    const outcome = await this.dataSource.transaction(async (tx) => {
       const sheet = await tx.findOneOrFail(DataSheet, {
         where: { id: seen.dataSheetId },
         lock: { mode: 'pessimistic_write' },
@@ -110,6 +124,8 @@ export class ReleasesService {
       await this.notices.withdrawn(tx, { sheet, version: saved });
       return accepted(saved);
     });
+    this.sheets.forget(seen.dataSheetId);
+    return outcome;
   }
 
   async findByHash(contentHash: string): Promise<Release | null> {

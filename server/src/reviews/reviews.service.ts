@@ -3,6 +3,7 @@ import { DataSource, In } from 'typeorm';
 import { accepted, type Outcome, refused } from '../common/problem.js';
 import { type Viewer } from '../common/viewer.js';
 import { DataSheetVersion } from '../data-sheets/data-sheet-version.entity.js';
+import { DataSheetsService } from '../data-sheets/data-sheets.service.js';
 import { DraftingService } from '../data-sheets/drafting.service.js';
 import { statusAfter, transitionProblems } from '../data-sheets/version-rules.js';
 import { Fit } from '../fits/fit.entity.js';
@@ -31,6 +32,7 @@ function completeChecklist(given: readonly ChecklistAnswer[] | null | undefined)
 export class ReviewsService {
   constructor(
     private readonly dataSource: DataSource,
+    private readonly sheets: DataSheetsService,
     private readonly drafting: DraftingService,
     private readonly fits: FitsService,
   ) {}
@@ -50,7 +52,7 @@ export class ReviewsService {
     const seriesOwnerIds = await this.drafting.seriesOwners(this.dataSource.manager, seen);
     const problems = transitionProblems(action, { ...seen, seriesOwnerIds }, viewer.id, request.remark);
     if (problems.length > 0) return refused(...problems);
-    return this.dataSource.transaction(async (tx) => {
+    const outcome = await this.dataSource.transaction(async (tx) => {
       const version = await this.drafting.lock(tx, request.versionId, seen.lockVersion);
       version.status = statusAfter(action);
       const saved = await tx.save(version);
@@ -66,6 +68,8 @@ export class ReviewsService {
       await this.drafting.record(tx, saved, action, request.remark.trim(), viewer);
       return accepted(saved);
     });
+    this.sheets.forget(seen.dataSheetId);
+    return outcome;
   }
 
   /** Fits again from the stored points and compares to 12 digits. @throws {ApiError} NOT_FOUND */

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { DataSource, EntityManager, In, QueryFailedError } from 'typeorm';
 import { ApiError } from '../common/api-error.js';
+import { cachedBatch } from '../common/cached-batch.js';
 import { isId } from '../common/graphql/node.js';
 import { type Page } from '../common/graphql/connection.js';
 import { accepted, type Outcome, problem, refused } from '../common/problem.js';
@@ -11,6 +12,10 @@ import { type SubstanceInput, type SubstanceRef, type UpdateSubstanceInput } fro
 
 /** PostgreSQL's SQLSTATE for a broken unique constraint. */
 const UNIQUE_VIOLATION = '23505';
+
+const SUBSTANCES_REMEMBERED = 2_000;
+/** How long another process's change may go unseen, ms. */
+const TRUSTED_MS = 1_000;
 
 /** Lower rank first: exact names before beginnings before the rest. */
 const RANK = `CASE
@@ -31,11 +36,11 @@ export class SubstancesService {
   constructor(private readonly dataSource: DataSource) {}
 
   /** Batch function for `loaderFor`: one entry per id, in the order asked. */
-  readonly byIds = async (ids: readonly string[]): Promise<(Substance | Error)[]> => {
+  readonly byIds = cachedBatch<Substance>({ max: SUBSTANCES_REMEMBERED, ttl: TRUSTED_MS }, async (ids) => {
     const found = await this.dataSource.getRepository(Substance).findBy({ id: In([...ids]) });
     const byId = new Map(found.map((substance) => [substance.id, substance]));
     return ids.map((id) => byId.get(id) ?? new Error(`no substance ${id}`));
-  };
+  });
 
   /** Substances by name, synonym, formula or CAS RN, best match first; all by name without a search. */
   async search(search: string | null | undefined, page: Page): Promise<[Substance[], number]> {
@@ -89,7 +94,7 @@ export class SubstancesService {
   async update(input: UpdateSubstanceInput): Promise<Outcome<Substance>> {
     const problems = substanceProblems(input);
     if (problems.length > 0) return refused(...problems);
-    return this.keep(() =>
+    const outcome = await this.keep(() =>
       this.dataSource.transaction(async (tx) => {
         const lock = { mode: 'pessimistic_write' } as const;
         const substance = isId(input.id) ? await tx.findOne(Substance, { where: { id: input.id }, lock }) : null;
@@ -103,6 +108,8 @@ export class SubstancesService {
         return tx.save(Object.assign(substance, fieldsOf(input)));
       }),
     );
+    this.byIds.forget(input.id);
+    return outcome;
   }
 
   private async keep(write: () => Promise<Substance>): Promise<Outcome<Substance>> {
