@@ -29,5 +29,10 @@ export function lnResidual(
   data: ReducedData,
   reference: ReferenceState,
 ): Float64Array {
-  return data.lnDiffusivity.map((value, i) => value - form.lnRatio(shape, data.x[i]!, data.p[i]!, reference));
+  const rows = data.x.length;
+  const residuals = new Float64Array(rows);
+  for (let i = 0; i < rows; i++) {
+    residuals[i] = data.lnDiffusivity[i]! - form.lnRatio(shape, data.x[i]!, data.p[i]!, reference);
+  }
+  return residuals;
 }

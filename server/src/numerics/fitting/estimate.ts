@@ -9,6 +9,8 @@ export interface Estimate {
   readonly knownCovariance: number[][];
   /** Degrees of freedom of the other part */
   readonly degreesOfFreedom: number;
+  /** (XᵀWX)⁻¹ of the points alone: W their robust weights over their variances, neither scaled nor with series parts */
+  readonly pointCovariance: number[][];
   /** Variances of the points' relative residuals, before the scale */
   readonly variances: Float64Array;
   /** The common factor on these variances */

@@ -9,6 +9,7 @@ const SAME = 1e-6;
 /** What keeps a recipe or its points from being fitted at all; empty when nothing does. */
 export function problemsOfInput(series: readonly FitSeries[], recipe: FitRecipe): EngineProblem[] {
   const problems = problemsOfRecipe(recipe);
+  const isWeighted = recipe.weighting !== 'EQUAL';
   if (series.length === 0) problems.push(badInput('A fit needs at least one series', 'series'));
   series.forEach((one, s) => {
     const path = `series.${s}`;
@@ -16,25 +17,30 @@ export function problemsOfInput(series: readonly FitSeries[], recipe: FitRecipe)
     if (!isUncertainty(one.commonRelativeUncertainty)) {
       problems.push(badInput('The common uncertainty must be a number ≥ 0', `${path}.commonRelativeUncertainty`));
     }
-    one.points.forEach((point, i) => problems.push(...problemsOfPoint(point, `${path}.points.${i}`, recipe)));
+    one.points.forEach((point, i) => {
+      checkPoint(point, isWeighted, (message, quantity) =>
+        problems.push(badInput(message, `${path}.points.${i}.${quantity}`)),
+      );
+    });
   });
   return problems;
 }
 
 /** What the points, though sound one by one, cannot determine; empty when every parameter can be found. */
-export function problemsOfDetermination(points: readonly FitPoint[], form: CorrelationForm): EngineProblem[] {
+export function problemsOfDetermination(series: readonly FitSeries[], form: CorrelationForm): EngineProblem[] {
   const problems: EngineProblem[] = [];
   const count = form.parameters.length;
-  if (isConstant(points.map((point) => point.temperature))) {
+  const pointCount = series.reduce((sum, { points }) => sum + points.length, 0);
+  if (isConstant(series, (point) => point.temperature)) {
     problems.push(notDeterminable('All points have one temperature: the exponent n of T cannot be determined'));
   }
-  if (form.fitsPressure && isConstant(points.map((point) => point.pressure))) {
+  if (form.fitsPressure && isConstant(series, (point) => point.pressure)) {
     problems.push(notDeterminable('All points have one pressure: the exponent m of P cannot be determined'));
   }
-  if (points.length <= count) {
+  if (pointCount <= count) {
     problems.push(
       notDeterminable(
-        `${points.length} points cannot determine ${count} parameters with an uncertainty: ${count + 1} are needed`,
+        `${pointCount} points cannot determine ${count} parameters with an uncertainty: ${count + 1} are needed`,
       ),
     );
   }
@@ -66,22 +72,27 @@ function problemsOfRecipe(recipe: FitRecipe): EngineProblem[] {
   return problems;
 }
 
-function problemsOfPoint(point: FitPoint, path: string, recipe: FitRecipe): EngineProblem[] {
-  const problems: EngineProblem[] = [];
-  for (const quantity of ['temperature', 'pressure', 'diffusivity'] as const) {
-    if (!isPositive(point[quantity]))
-      problems.push(badInput(`The ${quantity} must be a number above zero`, `${path}.${quantity}`));
+const MEASURED = ['temperature', 'pressure', 'diffusivity'] as const;
+const UNCERTAINTIES = ['diffusivityUncertainty', 'temperatureUncertainty', 'pressureUncertainty'] as const;
+
+/** Says of each quantity of a point that cannot stand why it cannot. */
+function checkPoint(
+  point: FitPoint,
+  isWeighted: boolean,
+  say: (message: string, quantity: keyof FitPoint) => void,
+): void {
+  for (const quantity of MEASURED) {
+    if (!isPositive(point[quantity])) say(`The ${quantity} must be a number above zero`, quantity);
   }
-  for (const quantity of ['diffusivityUncertainty', 'temperatureUncertainty', 'pressureUncertainty'] as const) {
-    if (!isUncertainty(point[quantity]))
-      problems.push(badInput('An uncertainty must be a number ≥ 0', `${path}.${quantity}`));
+  for (const quantity of UNCERTAINTIES) {
+    if (!isUncertainty(point[quantity])) say('An uncertainty must be a number ≥ 0', quantity);
   }
-  const isWeighted = recipe.weighting !== 'EQUAL';
-  if (isWeighted && (point.diffusivityUncertainty === null || point.diffusivityUncertainty === 0)) {
-    const message = 'The point has no uncertainty of D to be weighted by: state or assign one, or choose equal weights';
-    problems.push(badInput(message, `${path}.diffusivityUncertainty`));
+  if (isWeighted && !(point.diffusivityUncertainty ?? 0)) {
+    say(
+      'The point has no uncertainty of D to be weighted by: state or assign one, or choose equal weights',
+      'diffusivityUncertainty',
+    );
   }
-  return problems;
 }
 
 function badInput(message: string, path: string): EngineProblem {
@@ -96,8 +107,14 @@ function isUncertainty(value: number | null): boolean {
   return value === null || (Number.isFinite(value) && value >= 0);
 }
 
-function isConstant(values: readonly number[]): boolean {
-  const lowest = values.reduce((a, b) => Math.min(a, b), Infinity);
-  const highest = values.reduce((a, b) => Math.max(a, b), 0);
+function isConstant(series: readonly FitSeries[], quantity: (point: FitPoint) => number): boolean {
+  let lowest = Infinity;
+  let highest = 0;
+  for (const { points } of series) {
+    for (const point of points) {
+      lowest = Math.min(lowest, quantity(point));
+      highest = Math.max(highest, quantity(point));
+    }
+  }
   return highest - lowest <= SAME * highest;
 }

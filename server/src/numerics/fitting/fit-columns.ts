@@ -25,33 +25,59 @@ export interface FitColumns {
   readonly seriesIndex: Int32Array;
 }
 
-type Indexed<T> = readonly [item: T, index: number];
+interface PlacedSeries {
+  readonly common: number;
+  readonly index: number;
+  readonly points: readonly FitPoint[];
+  /** Index in the input of each of the points */
+  readonly places: readonly number[];
+}
 
 export function fitColumns(series: readonly FitSeries[]): FitColumns {
-  const sorted = series.map((one, index) => ({ one, index, points: sortedPoints(one.points) })).sort(compareSeries);
-  const rows = sorted.flatMap(({ points }) => points);
-  const column = (value: (point: FitPoint) => number) => Float64Array.from(rows, ([point]) => value(point));
-  const seriesStart = new Int32Array(sorted.length + 1);
-  sorted.forEach(({ points }, s) => (seriesStart[s + 1] = seriesStart[s]! + points.length));
-  return {
-    count: rows.length,
-    seriesCount: sorted.length,
-    seriesStart,
-    common: Float64Array.from(sorted, ({ one }) => one.commonRelativeUncertainty ?? 0),
-    temperature: column((point) => point.temperature),
-    pressure: column((point) => point.pressure),
-    diffusivity: column((point) => point.diffusivity),
-    lnTemperature: column((point) => Math.log(point.temperature)),
-    lnPressure: column((point) => Math.log(point.pressure)),
-    lnDiffusivity: column((point) => Math.log(point.diffusivity)),
-    relativeU: {
-      diffusivity: column((point) => (point.diffusivityUncertainty ?? 0) / point.diffusivity),
-      temperature: column((point) => (point.temperatureUncertainty ?? 0) / point.temperature),
-      pressure: column((point) => (point.pressureUncertainty ?? 0) / point.pressure),
-    },
-    pointIndex: Int32Array.from(rows, ([, index]) => index),
+  const sorted = series.map(placed).sort(compareSeries);
+  const count = series.reduce((sum, { points }) => sum + points.length, 0);
+  // One block of memory for all columns: allocating it costs more than filling it.
+  const block = new Float64Array(9 * count);
+  let used = 0;
+  const column = () => block.subarray(used, (used += count));
+  const columns = {
+    count,
+    seriesCount: series.length,
+    seriesStart: new Int32Array(series.length + 1),
+    common: Float64Array.from(sorted, ({ common }) => common),
+    temperature: column(),
+    pressure: column(),
+    diffusivity: column(),
+    lnTemperature: column(),
+    lnPressure: column(),
+    lnDiffusivity: column(),
+    relativeU: { diffusivity: column(), temperature: column(), pressure: column() },
+    pointIndex: new Int32Array(count),
     seriesIndex: Int32Array.from(sorted, ({ index }) => index),
   };
+  let row = 0;
+  sorted.forEach(({ points, places }, s) => {
+    for (let i = 0; i < points.length; i++) {
+      fillRow(columns, row, points[i]!);
+      columns.pointIndex[row] = places[i]!;
+      row++;
+    }
+    columns.seriesStart[s + 1] = row;
+  });
+  return columns;
+}
+
+function fillRow(columns: FitColumns, row: number, point: FitPoint): void {
+  const { temperature, pressure, diffusivity } = point;
+  columns.temperature[row] = temperature;
+  columns.pressure[row] = pressure;
+  columns.diffusivity[row] = diffusivity;
+  columns.lnTemperature[row] = Math.log(temperature);
+  columns.lnPressure[row] = Math.log(pressure);
+  columns.lnDiffusivity[row] = Math.log(diffusivity);
+  columns.relativeU.diffusivity[row] = (point.diffusivityUncertainty ?? 0) / diffusivity;
+  columns.relativeU.temperature[row] = (point.temperatureUncertainty ?? 0) / temperature;
+  columns.relativeU.pressure[row] = (point.pressureUncertainty ?? 0) / pressure;
 }
 
 /** A column mean with weights. */
@@ -65,8 +91,9 @@ export function weightedMean(values: Float64Array, weights: Float64Array): numbe
   return sum / total;
 }
 
-function sortedPoints(points: readonly FitPoint[]): Indexed<FitPoint>[] {
-  return points.map((point, index): Indexed<FitPoint> => [point, index]).sort(([a], [b]) => comparePoints(a, b));
+function placed({ points, commonRelativeUncertainty }: FitSeries, index: number): PlacedSeries {
+  const places = points.map((_, i) => i).sort((a, b) => comparePoints(points[a]!, points[b]!));
+  return { common: commonRelativeUncertainty ?? 0, index, points: places.map((i) => points[i]!), places };
 }
 
 function comparePoints(a: FitPoint, b: FitPoint): number {
@@ -80,17 +107,10 @@ function comparePoints(a: FitPoint, b: FitPoint): number {
   );
 }
 
-interface SortableSeries {
-  readonly one: FitSeries;
-  readonly points: readonly Indexed<FitPoint>[];
-}
-
-function compareSeries(a: SortableSeries, b: SortableSeries): number {
+function compareSeries(a: PlacedSeries, b: PlacedSeries): number {
   for (let i = 0; i < Math.min(a.points.length, b.points.length); i++) {
-    const order = comparePoints(a.points[i]![0], b.points[i]![0]);
+    const order = comparePoints(a.points[i]!, b.points[i]!);
     if (order !== 0) return order;
   }
-  return (
-    a.points.length - b.points.length || (a.one.commonRelativeUncertainty ?? 0) - (b.one.commonRelativeUncertainty ?? 0)
-  );
+  return a.points.length - b.points.length || a.common - b.common;
 }

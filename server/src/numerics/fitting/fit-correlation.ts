@@ -22,10 +22,7 @@ export function fitCorrelation(series: readonly FitSeries[], recipe: FitRecipe):
   const problems = problemsOfInput(series, recipe);
   const form = findForm(recipe.form);
   if (problems.length > 0 || !form) return { ok: false, problems };
-  const undetermined = problemsOfDetermination(
-    series.flatMap(({ points }) => points),
-    form,
-  );
+  const undetermined = problemsOfDetermination(series, form);
   if (undetermined.length > 0) return { ok: false, problems: undetermined };
   try {
     return fitSound(series, recipe, form);

@@ -14,21 +14,35 @@ export interface FitTask {
 }
 
 export function fitTask(form: CorrelationForm, recipe: FitRecipe, columns: FitColumns): FitTask {
-  const weights = columns.relativeU.diffusivity.map((u) => (recipe.weighting === 'EQUAL' ? 1 : 1 / (u * u)));
+  const weights = centreWeights(recipe, columns);
   const lnT = weightedMean(columns.lnTemperature, weights);
   const lnP = weightedMean(columns.lnPressure, weights);
   const data = {
-    x: columns.lnTemperature.map((value) => value - lnT),
-    p: columns.lnPressure.map((value) => value - lnP),
+    x: lessened(columns.lnTemperature, lnT),
+    p: lessened(columns.lnPressure, lnP),
     lnDiffusivity: columns.lnDiffusivity,
   };
   return { form, recipe, columns, centre: { temperature: Math.exp(lnT), pressure: Math.exp(lnP) }, data };
 }
 
+function centreWeights({ weighting }: FitRecipe, { count, relativeU }: FitColumns): Float64Array {
+  const weights = new Float64Array(count).fill(1);
+  if (weighting === 'EQUAL') return weights;
+  for (let i = 0; i < count; i++) weights[i] = relativeU.diffusivity[i]! ** -2;
+  return weights;
+}
+
+function lessened(column: Float64Array, by: number): Float64Array {
+  const result = column.slice();
+  for (let i = 0; i < result.length; i++) result[i]! -= by;
+  return result;
+}
+
 /** ln D − ln f at every point; `beta` is ln D0 at the centre, then the shape. */
 export function lnDeviations(task: FitTask, beta: Float64Array): Float64Array {
-  const shape = beta.subarray(1);
-  return lnResidual(task.form, shape, task.data, task.centre).map((value) => value - beta[0]!);
+  const deviations = lnResidual(task.form, beta.subarray(1), task.data, task.centre);
+  for (let i = 0; i < deviations.length; i++) deviations[i]! -= beta[0]!;
+  return deviations;
 }
 
 /**
@@ -48,18 +62,24 @@ export function relativeResiduals(task: FitTask, deviations: Float64Array): Floa
 export function relativeVariances(task: FitTask, beta: Float64Array, deviations: Float64Array): Float64Array {
   const { form, recipe, columns, centre, data } = task;
   const shape = beta.subarray(1);
-  const isLogarithmic = recipe.objective === 'LN_DIFFUSIVITY';
+  const isEqual = recipe.weighting === 'EQUAL';
   const { diffusivity: uD, temperature: uT, pressure: uP } = columns.relativeU;
+  const variances = new Float64Array(columns.count);
+  for (let i = 0; i < variances.length; i++) variances[i] = isEqual ? 1 : uD[i]! * uD[i]!;
+  if (recipe.objective === 'DIFFUSIVITY') {
+    // What is stated in m²/s is brought to the fitted value: u(D)/f = (u(D)/D) (D/f).
+    for (let i = 0; i < variances.length; i++) {
+      const ratio = Math.exp(deviations[i]!) / (isEqual ? columns.diffusivity[i]! : 1);
+      variances[i]! *= ratio * ratio;
+    }
+  }
+  if (!variancesFollowFit(task)) return variances;
   const exponentOfP = form.pressureExponent(shape);
-  return deviations.map((deviation, i) => {
-    // On D, what is stated in m²/s is brought to the fitted value: u(D)/f = (u(D)/D) (D/f).
-    const ratio = isLogarithmic ? 1 : Math.exp(deviation);
-    if (recipe.weighting === 'EQUAL') return isLogarithmic ? 1 : (ratio / columns.diffusivity[i]!) ** 2;
-    const ofDiffusivity = (uD[i]! * ratio) ** 2;
-    if (recipe.weighting === 'STATED') return ofDiffusivity;
+  for (let i = 0; i < variances.length; i++) {
     const exponentOfT = form.temperatureExponent(shape, data.x[i]!, centre);
-    return ofDiffusivity + (exponentOfT * uT[i]!) ** 2 + (exponentOfP * uP[i]!) ** 2;
-  });
+    variances[i]! += (exponentOfT * uT[i]!) ** 2 + (exponentOfP * uP[i]!) ** 2;
+  }
+  return variances;
 }
 
 /** Do the variances move with the parameters, beyond what the objective's own solver follows? */

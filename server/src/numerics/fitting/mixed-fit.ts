@@ -4,7 +4,8 @@ import { EngineError } from './engine-error.js';
 import { type Estimate } from './estimate.js';
 import { lnDeviations, relativeResiduals, relativeVariances, variancesFollowFit, type FitTask } from './fit-task.js';
 import { type BetweenSeries, type FitRecipe } from './fit.types.js';
-import { fitPooled } from './pooled-fit.js';
+import { tangentFit } from './point-fit.js';
+import { fitPooled, LEAST_SCATTER } from './pooled-fit.js';
 import { likelihoodAt, type SeriesProducts } from './restricted-likelihood.js';
 import { seriesProducts } from './series-products.js';
 import { fitComponents, type ComponentModel, type FittedComponents } from './variance-components.js';
@@ -15,8 +16,6 @@ export const USUAL_DEVIATION = 0.03;
 const ENOUGH_SERIES = 3;
 const SETTLED = 1e-13;
 const ROUNDS = 200;
-/** Residuals of exact data are rounding; a relative scatter below this is not told from none. */
-const LEAST_SCATTER = 1e-12;
 /** Under equal weights the scale is free; this part of the scatter of all points keeps its logarithm finite. */
 const LEAST_SCALE = 1e-10;
 
@@ -102,6 +101,7 @@ function estimateOf(task: FitTask, round: TangentFit, beta: Float64Array): Estim
     covariance: scaled(at.covariance, unit ** 2),
     knownCovariance: isAssigned ? scaled(at.betweenCovariance, unit ** 2) : zeros(beta.length),
     degreesOfFreedom: isAssigned ? withinFreedom(task) : columns.seriesCount - 1,
+    pointCovariance: pointCovariance(task, beta, variances),
     variances,
     scale,
     robustWeights: new Float64Array(columns.count).fill(1),
@@ -118,6 +118,11 @@ function estimateOf(task: FitTask, round: TangentFit, beta: Float64Array): Estim
       : { value: Math.sqrt(between.intercept), origin: 'STATED' },
     likelihood: likelihoodOf(task, round, beta),
   };
+}
+
+function pointCovariance(task: FitTask, beta: Float64Array, variances: Float64Array): number[][] {
+  const weights = variances.map((variance) => 1 / variance);
+  return tangentFit(task, beta, new Float64Array(variances.length), weights).unscaledCovariance;
 }
 
 /** Degrees of freedom of the scatter within the series, which is all that one or two series can show. */

@@ -5,33 +5,69 @@ import { solveLeastSquares } from '../least-squares/solve.js';
 import { EngineError } from './engine-error.js';
 import { lnDeviations, type FitTask } from './fit-task.js';
 
+/** Parameters and what the points alone say of them. */
+export interface PointFit {
+  /** ln D0 at the centre, then the shape */
+  readonly beta: Float64Array;
+  /** (XᵀWX)⁻¹ of beta, W = weights/variances */
+  readonly unscaledCovariance: number[][];
+}
+
 /**
  * The parameters that least squares with given weights gives, all points alike.
  *
  * On ln D a linear form takes one QR factorisation; everything else goes through the general solver.
  *
- * @param variances of the relative residuals, length N
+ * @param variances of the relative residuals at `near`, length N
  * @param weights   factors on the reciprocal variances, 0 to 1
- * @param near      where to start, null for the form's own start
- * @returns ln D0 at the centre, then the shape
+ * @param near      where to start, null for the form's own start and residuals of zero
  */
 export function fitPoints(
   task: FitTask,
   variances: Float64Array,
   weights: Float64Array,
   near: Float64Array | null,
-): Float64Array {
-  if (task.recipe.objective === 'LN_DIFFUSIVITY' && task.form.isLinear) {
-    const reciprocals = variances.map((variance, i) => weights[i]! / variance);
-    const origin = new Float64Array(task.form.parameters.length);
-    return tangentFit(task, origin, lnDeviations(task, origin), reciprocals).solution;
-  }
+): PointFit {
+  return task.recipe.objective === 'LN_DIFFUSIVITY' && task.form.isLinear
+    ? fitLogarithms(task, variances, weights)
+    : fitDirectly(task, variances, weights, near);
+}
+
+function fitLogarithms(task: FitTask, variances: Float64Array, weights: Float64Array): PointFit {
+  const origin = new Float64Array(task.form.parameters.length);
+  const { solution, unscaledCovariance } = tangentFit(
+    task,
+    origin,
+    lnDeviations(task, origin),
+    reciprocals(variances, weights),
+  );
+  return { beta: solution, unscaledCovariance };
+}
+
+function fitDirectly(
+  task: FitTask,
+  variances: Float64Array,
+  weights: Float64Array,
+  near: Float64Array | null,
+): PointFit {
   const deviations = near ? lnDeviations(task, near) : new Float64Array(task.columns.count);
   const start = near ?? new Float64Array([0, ...task.form.start(task.data, task.centre)]);
   const sigma = variances.map((variance, i) => Math.sqrt(variance / weights[i]!) * fittedValue(task, deviations, i));
-  const { parameters } = solveLeastSquares(directProblem(task, sigma), [Math.exp(start[0]!), ...start.subarray(1)]);
-  parameters[0] = Math.log(parameters[0]!);
-  return parameters;
+  const solution = solveLeastSquares(directProblem(task, sigma), [Math.exp(start[0]!), ...start.subarray(1)]);
+  const beta = solution.parameters;
+  const d0 = beta[0]!;
+  beta[0] = Math.log(d0);
+  const unscaledCovariance = solution.unscaledCovariance.map((row, i) =>
+    row.map((value, j) => value / (i === 0 ? d0 : 1) / (j === 0 ? d0 : 1)),
+  );
+  return { beta, unscaledCovariance };
+}
+
+/** weights/variances */
+export function reciprocals(variances: Float64Array, weights: Float64Array): Float64Array {
+  const result = new Float64Array(variances.length);
+  for (let i = 0; i < result.length; i++) result[i] = weights[i]! / variances[i]!;
+  return result;
 }
 
 /**

@@ -7,7 +7,7 @@ import { type Estimate } from './estimate.js';
 import { lnDeviations, relativeResiduals, type FitTask } from './fit-task.js';
 import { type FitSeries, type FitStatistics, type FittedCorrelation, type FittedPoint } from './fit.types.js';
 import { fitWarnings } from './fit-warnings.js';
-import { tangentFit } from './point-fit.js';
+import { reciprocals } from './point-fit.js';
 import { restate } from './restate.js';
 import { heterogeneity, offsetsOf, type Offsets } from './series-offsets.js';
 import { validityOf } from './validity.js';
@@ -106,15 +106,17 @@ function aiccOf({ likelihood }: Estimate, count: number): number | null {
 
 /** R. D. Cook, *Technometrics* 19 (1977) 15, on what is left of the residuals when the series' own parts are taken out. */
 function cookDistances(task: FitTask, estimate: Estimate, deviations: Float64Array): Float64Array {
-  const { beta, variances, scale, robustWeights, seriesParts } = estimate;
+  const { beta, scale, pointCovariance, seriesParts } = estimate;
   const residuals = relativeResiduals(task, deviations);
-  const weights = variances.map((variance, i) => robustWeights[i]! / (variance * scale));
-  const { unscaledCovariance } = tangentFit(task, beta, residuals, weights);
-  const hat = leverages(lnDesign(task.form, beta.subarray(1), task.data, task.centre), weights, unscaledCovariance);
-  return residuals.map((residual, i) => {
-    const left = residual - seriesParts[i]!;
-    return (left * left * weights[i]! * hat[i]!) / (beta.length * (1 - hat[i]!) ** 2);
-  });
+  const weights = reciprocals(estimate.variances, estimate.robustWeights);
+  const design = lnDesign(task.form, beta.subarray(1), task.data, task.centre);
+  const distances = leverages(design, weights, pointCovariance);
+  for (let i = 0; i < distances.length; i++) {
+    const hat = distances[i]!;
+    const left = residuals[i]! - seriesParts[i]!;
+    distances[i] = (left * left * weights[i]! * hat) / (scale * beta.length * (1 - hat) ** 2);
+  }
+  return distances;
 }
 
 function offsetsInOrder(

@@ -10,9 +10,8 @@ const ASSUMED_PRESSURES = { minimum: 1e3, maximum: 4e5 };
 
 /** The range of the points that carried weight. */
 export function validityOf(form: CorrelationForm, columns: FitColumns, weights: Float64Array): Validity {
-  const carried = (column: Float64Array) => column.filter((_, i) => weights[i]! > 0);
-  const temperatures = extent(carried(columns.temperature));
-  const pressures = extent(carried(columns.pressure));
+  const temperatures = extent(columns.temperature, weights);
+  const pressures = extent(columns.pressure, weights);
   return {
     temperatureMinimum: temperatures.minimum,
     temperatureMaximum: temperatures.maximum,
@@ -22,9 +21,13 @@ export function validityOf(form: CorrelationForm, columns: FitColumns, weights: 
   };
 }
 
-function extent(values: Float64Array): { minimum: number; maximum: number } {
-  return {
-    minimum: values.reduce((a, b) => Math.min(a, b), Infinity),
-    maximum: values.reduce((a, b) => Math.max(a, b), 0),
-  };
+function extent(column: Float64Array, weights: Float64Array): { minimum: number; maximum: number } {
+  let minimum = Infinity;
+  let maximum = 0;
+  for (let i = 0; i < column.length; i++) {
+    if (weights[i] === 0) continue;
+    minimum = Math.min(minimum, column[i]!);
+    maximum = Math.max(maximum, column[i]!);
+  }
+  return { minimum, maximum };
 }

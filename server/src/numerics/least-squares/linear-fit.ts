@@ -19,7 +19,7 @@ const DEPENDENT = 1e-9;
 /**
  * Weighted linear least squares by QR of the whitened design.
  *
- * @param design  column-major rows×columns; kept
+ * @param design  column-major rows×columns; overwritten
  * @param right   length rows; kept
  * @param weights length rows, ≥ 0: reciprocal variances
  * @returns the fit, or the index of the first parameter that the rows cannot tell from those before it
@@ -31,13 +31,16 @@ export function fitLinear(
 ): LinearFit | { readonly undeterminable: number } {
   const rows = right.length;
   const columns = design.length / rows;
-  const roots = weights.map(Math.sqrt);
-  const whitened = design.map((value, i) => value * roots[i % rows]!);
-  const norms = columnNorms(whitened, rows, columns);
-  const factors = factorise(whitened, rows, columns);
+  const response = new Float64Array(rows);
+  for (let i = 0; i < rows; i++) {
+    const root = Math.sqrt(weights[i]!);
+    response[i] = root * right[i]!;
+    for (let at = i; at < design.length; at += rows) design[at]! *= root;
+  }
+  const norms = columnNorms(design, rows, columns);
+  const factors = factorise(design, rows, columns);
   const undeterminable = dependentColumn(factors, norms, DEPENDENT);
   if (undeterminable >= 0) return { undeterminable };
-  const response = right.map((value, i) => value * roots[i]!);
   applyQTransposed(factors, response);
   return { solution: solveUpper(factors, response), unscaledCovariance: inverseGram(factors) };
 }

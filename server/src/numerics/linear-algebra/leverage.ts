@@ -9,8 +9,10 @@ import { quadraticForm } from './matrices.js';
 export function leverages(design: Float64Array, weights: Float64Array, unscaledCovariance: number[][]): Float64Array {
   const rows = weights.length;
   const row = new Float64Array(unscaledCovariance.length);
-  return weights.map((weight, i) => {
+  const hats = new Float64Array(rows);
+  for (let i = 0; i < rows; i++) {
     for (let k = 0; k < row.length; k++) row[k] = design[k * rows + i]!;
-    return weight * quadraticForm(unscaledCovariance, row);
-  });
+    hats[i] = weights[i]! * quadraticForm(unscaledCovariance, row);
+  }
+  return hats;
 }
