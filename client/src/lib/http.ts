@@ -1,4 +1,4 @@
-/** One field of a refused request, as in the `errors` of a problem. */
+/** One field of a refused request, as in the `problems` of its answer. */
 export interface FieldProblem {
   readonly path?: string;
   readonly message: string;
@@ -33,7 +33,8 @@ interface RequestOptions {
 export async function request<T>(path: string, options: RequestOptions, read: (answer: unknown) => T): Promise<T> {
   const response = await send(path, options);
   if (!response.ok) throw await problemOf(response);
-  return read(response.status === 204 ? null : await response.json());
+  const text = await response.text();
+  return read(text === '' ? null : JSON.parse(text));
 }
 
 async function send(path: string, { method = 'GET', json, form, accessToken, signal }: RequestOptions) {
@@ -53,7 +54,7 @@ async function problemOf(response: Response): Promise<HttpProblem> {
   const problem = record(await response.json().catch(() => null));
   const message = text(problem['detail']) ?? text(problem['title']) ?? `The service answered ${response.status}.`;
   const retryAfter = Number(response.headers.get('Retry-After') ?? NaN);
-  const fields = Array.isArray(problem['errors']) ? problem['errors'].flatMap(fieldProblem) : [];
+  const fields = Array.isArray(problem['problems']) ? problem['problems'].flatMap(fieldProblem) : [];
   return new HttpProblem(response.status, message, Number.isFinite(retryAfter) ? retryAfter : null, fields);
 }
 

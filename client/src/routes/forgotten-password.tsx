@@ -1,1 +1,2 @@
-export const Component = () => null;
+/** /reset-password */
+export { ForgottenPasswordPage as Component } from '../features/account/password-pages';

@@ -1,1 +1,8 @@
-export const Component = () => null;
+import { useParams } from 'react-router-dom';
+import { InvitationPage } from '../features/account/invitation-page';
+
+/** /invitation/:token */
+export function Component() {
+  const { token = '' } = useParams();
+  return <InvitationPage token={token} />;
+}

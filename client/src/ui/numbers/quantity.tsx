@@ -1,4 +1,11 @@
-import { differenceFromSi, fromSi, unitLabel, useReaderUnits, type Quantity as QuantityKind } from '../../lib/units';
+import {
+  differenceFromSi,
+  fromSi,
+  unitLabel,
+  useReaderUnits,
+  type Quantity as QuantityKind,
+  type ReaderUnits,
+} from '../../lib/units';
 import { formatShort, withUnit } from '../../lib/format-quantity';
 import { Concise, Num, Unit } from './num';
 
@@ -48,10 +55,18 @@ export function rangeText<K extends QuantityKind>(
   kind: K,
   low: number,
   high: number,
-  unit: ReturnType<typeof useReaderUnits>[K],
+  unit: ReaderUnits[K],
   digits = 6,
 ): string {
   const label = unitLabel(kind, unit);
   const end = (value: number) => withUnit(formatShort(fromSi(kind, value, unit), digits), label);
   return `${end(low)} to ${end(high)}`;
 }
+
+/** `298.15 K` as plain text, in that unit. */
+export const quantityText = <K extends QuantityKind>(
+  kind: K,
+  value: number,
+  unit: ReaderUnits[K],
+  digits = 6,
+): string => withUnit(formatShort(fromSi(kind, value, unit), digits), unitLabel(kind, unit));

@@ -108,6 +108,7 @@ export const mastheadRecipe = defineSlotRecipe({
       textStyle: 'small',
       color: 'ink',
       display: 'grid',
+      '&[hidden]': { display: 'none' },
       gap: '8px',
       whiteSpace: 'normal',
     },

@@ -26,6 +26,7 @@ export const system = createSystem(
   defaultBaseConfig,
   defineConfig({
     cssVarsPrefix: 'dfl',
+    preflight: true,
     globalCss,
     theme: {
       breakpoints: { sm: '40rem', md: '56.3125rem', lg: '80rem', xl: '90.0625rem' },
