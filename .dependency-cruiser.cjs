@@ -1,3 +1,5 @@
+const path = require('node:path');
+
 /**
  * Rings of the server, innermost first: a module may import its own ring or one further in, never outwards.
  * The seeds stand outside all of them and may import every module.
@@ -12,7 +14,7 @@ const RINGS = [
   ['data-sheets'],
   ['sheet-documents', 'registrar', 'subscriptions'],
   ['reviews', 'releases'],
-  ['exports', 'home', 'health', 'explorer'],
+  ['exports', 'home', 'health', 'nodes', 'pages'],
 ];
 
 const inRing = (modules) => `^server/src/(${modules.join('|')})/`;
@@ -58,7 +60,11 @@ module.exports = {
   ],
   options: {
     tsPreCompilationDeps: true,
-    tsConfig: { fileName: 'server/tsconfig.spec.json' },
+    tsConfig: { fileName: path.join(__dirname, 'server/tsconfig.spec.json') },
+    enhancedResolveOptions: {
+      exportsFields: ['exports'],
+      conditionNames: ['import', 'require', 'node', 'default', 'types'],
+    },
     doNotFollow: { path: 'node_modules' },
     exclude: { path: '(^|/)dist/' },
   },

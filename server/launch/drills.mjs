@@ -13,7 +13,7 @@ await launch(async () => {
   fs.chmodSync(scratch, 0o711);
   const postgres = await startPostgres(path.join(scratch, 'data'), { durable: true });
   const file = path.join(scratch, 'jest.json');
-  let code = 1;
+  let code;
   try {
     ({ code } = await runAloud(
       path.join(ROOT, 'node_modules/.bin/jest'),

@@ -176,7 +176,7 @@ function isOfRecipe(fit: Fit, input: FitCorrelationInput): boolean {
   const used = new Set(fit.result.seriesOffsets.map((offset) => offset.key));
   const wanted = input.seriesIds ?? [];
   return (
-    fit.recipe.form === input.form &&
+    fit.recipe.form === String(input.form) &&
     used.size === wanted.length &&
     wanted.every((id) => used.has(id)) &&
     fit.excluded.length === (input.excludedPoints?.length ?? 0)
