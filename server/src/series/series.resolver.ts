@@ -69,6 +69,13 @@ export class SeriesResolver {
     return loaderFor(context, this.pointsStore.bySeries).load(series.id);
   }
 
+  @ResolveField(() => Int, {
+    description: 'Place among all series of its pair, from 0; gives its letter, colour and shape for ever.',
+  })
+  ordinal(@Parent() series: Series, @Context() context: object): Promise<number> {
+    return loaderFor(context, this.seriesService.ordinals).load(series.id);
+  }
+
   @ResolveField(() => Person, { nullable: true })
   async submittedBy(@Parent() series: Series, @Context() context: object): Promise<Person | null> {
     return series.submittedById ? loaderFor(context, this.people.byIds).load(series.submittedById) : null;

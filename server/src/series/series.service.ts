@@ -99,6 +99,19 @@ export class SeriesService {
     return ids.map((id) => byId.get(id) ?? new Error(`no series ${id}`));
   };
 
+  /** Batch function for `loaderFor`: place of each series among all of its pair, from 0, in the order they came. */
+  readonly ordinals = async (ids: readonly string[]): Promise<(number | Error)[]> => {
+    const rows: { id: string; ordinal: number }[] = await this.dataSource.query(
+      `SELECT id, ordinal FROM (
+         SELECT id, (row_number() OVER (PARTITION BY pair_id ORDER BY created_at, id) - 1)::int AS ordinal FROM series
+          WHERE pair_id IN (SELECT pair_id FROM series WHERE id = ANY ($1))
+       ) placed WHERE id = ANY ($1)`,
+      [ids],
+    );
+    const byId = new Map(rows.map((row) => [row.id, row.ordinal]));
+    return ids.map((id) => byId.get(id) ?? new Error(`no series ${id}`));
+  };
+
   /** Batch function for `loaderFor`: what happened to each series, oldest first. */
   readonly eventsBySeries = async (ids: readonly string[]): Promise<SeriesEvent[][]> => {
     const rows: (SeriesEvent & { seriesId: string })[] = await this.dataSource.query(
