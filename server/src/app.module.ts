@@ -2,11 +2,13 @@ import { type DynamicModule, Module } from '@nestjs/common';
 import { TypeOrmModule } from '@nestjs/typeorm';
 import { ApiKeysModule } from './api-keys/api-keys.module.js';
 import { AuthModule } from './auth/auth.module.js';
+import { BringInModule } from './bring-in/bring-in.module.js';
 import { GraphQLModule } from './common/graphql/graphql.module.js';
 import { ConfigModule } from './config/config.module.js';
 import { type Env } from './config/env.js';
 import { dataSourceOptions } from './database/data-source.js';
 import { DataSheetsModule } from './data-sheets/data-sheets.module.js';
+import { FilesModule } from './files/files.module.js';
 import { FitsModule } from './fits/fits.module.js';
 import { HealthModule } from './health/health.module.js';
 import { HomeModule } from './home/home.module.js';
@@ -38,7 +40,9 @@ export class AppModule {
         ApiKeysModule,
         SubstancesModule,
         PairsModule,
+        FilesModule,
         SeriesModule,
+        BringInModule,
         FitsModule,
         DataSheetsModule,
         ReviewsModule,

@@ -26,7 +26,8 @@ export interface Understood {
   /** relative standard uncertainty common to all points, when the table states one */
   commonRelativeUncertainty: number | null;
   pressureOrigin: TableMapping['pressureOrigin'];
-  /** nothing is refused and nothing undecided */
+  /** what still has to be mended or decided, rows that are left out apart */
+  openIssues: Issue[];
   isComplete: boolean;
 }
 
@@ -109,6 +110,7 @@ function conclude(rows: readonly TableRow[], mapping: TableMapping, measured: Me
   if (!states.includes('KEPT') && !states.includes('OPEN')) {
     found.issues.push(refusal('NO_ROWS', { row: null, column: null }, 'Every row is left out; nothing would be kept.'));
   }
+  const openIssues = found.issues.filter((one) => isOpen(one) && !isInLeftOutRow(one, leftOut));
   return {
     mapping,
     rows,
@@ -117,7 +119,8 @@ function conclude(rows: readonly TableRow[], mapping: TableMapping, measured: Me
     issues: found.issues,
     commonRelativeUncertainty: found.common,
     pressureOrigin: mapping.pressureOrigin,
-    isComplete: !found.issues.some((one) => isOpen(one) && !isInLeftOutRow(one, leftOut)),
+    openIssues,
+    isComplete: openIssues.length === 0,
   };
 }
 
@@ -130,6 +133,7 @@ function notUnderstood(rows: readonly TableRow[], mapping: TableMapping, issues:
     issues,
     commonRelativeUncertainty: null,
     pressureOrigin: mapping.pressureOrigin,
+    openIssues: issues.filter(isOpen),
     isComplete: false,
   };
 }

@@ -1,7 +1,7 @@
 import { fromSi, parseUnit, toSi, type Unit, unitOf, unitsOf } from '../../units/units.js';
 import { parseCellNumber } from '../numbers.js';
 import { doubt, type Issue } from '../issues.js';
-import { farOut, quartiles } from './quartiles.js';
+import { farOut, sturdyQuartiles } from './quartiles.js';
 import { type Judged, short } from './judged.js';
 
 /** Temperatures of one table may spread by so much without the middle half saying so, K. */
@@ -9,7 +9,7 @@ const LEAST_TEMPERATURE_RANGE = 10;
 /** Likewise for the logarithm of the pressure. */
 const LEAST_LOG_PRESSURE_RANGE = 0.05;
 /** Fewer rows have no middle to stand out from. */
-const FEWEST_ROWS = 4;
+const FEWEST_ROWS = 3;
 
 const TEMPERATURE_SCALES = ['K', '°C', '°F'].map(unitOf);
 
@@ -26,7 +26,7 @@ interface Reading {
 function temperatureDoubts(judged: Judged): Issue[] {
   const column = judged.columnOf('TEMPERATURE');
   const unit = unitOfColumn(judged, column);
-  const middle = quartiles(judged.temperature);
+  const middle = sturdyQuartiles(judged.temperature);
   if (unit === null || middle === null || judged.rows.length < FEWEST_ROWS) return [];
   const { lowest, highest } = farOut(middle, LEAST_TEMPERATURE_RANGE);
   const isUsual = (value: number): boolean => value >= lowest && value <= highest;
@@ -44,7 +44,7 @@ function temperatureDoubts(judged: Judged): Issue[] {
 function pressureDoubts(judged: Judged): Issue[] {
   const column = judged.columnOf('PRESSURE');
   const unit = unitOfColumn(judged, column);
-  const middle = quartiles(judged.pressure.map(Math.log));
+  const middle = sturdyQuartiles(judged.pressure.map(Math.log));
   if (unit === null || middle === null || judged.rows.length < FEWEST_ROWS) return [];
   const { lowest, highest } = farOut(middle, LEAST_LOG_PRESSURE_RANGE);
   const isUsual = (value: number): boolean => Math.log(value) >= lowest && Math.log(value) <= highest;

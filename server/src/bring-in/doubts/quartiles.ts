@@ -29,3 +29,15 @@ export function farOut({ lower, upper }: Quartiles, leastRange: number): { lowes
   const range = Math.max(upper - lower, leastRange);
   return { lowest: lower - 3 * range, highest: upper + 3 * range };
 }
+
+/**
+ * Median and median absolute deviation as quartiles of a symmetric distribution. Half of the values may be wrong before
+ * these are, where a single one spoils the quartiles of four.
+ */
+export function sturdyQuartiles(values: Iterable<number>): Quartiles | null {
+  const all = Float64Array.from(values);
+  const median = quartiles(all)?.median;
+  if (median === undefined) return null;
+  const deviation = quartiles(all.map((value) => Math.abs(value - median)))?.median ?? 0;
+  return { lower: median - deviation, median, upper: median + deviation };
+}

@@ -13,12 +13,16 @@ import {
 import { type Dialect, sniffDialect } from './dialect.js';
 import { decoded, detectEncoding } from './encoding.js';
 
-/** What the person corrected about how the text is to be read. */
+/** What the person corrected about how the text is to be read, and who follows the reading. */
 export interface TextOptions {
+  /** told how many rows were read so far */
+  onRows?: ((rows: number) => void) | undefined;
+  signal?: AbortSignal | undefined;
   delimiter?: Delimiter | undefined;
   decimal?: DecimalSign | undefined;
 }
 
+const ROWS_PER_REPORT = 5_000;
 const HEAD_CHARACTERS = 64 * 1024;
 
 /**
@@ -29,7 +33,7 @@ const HEAD_CHARACTERS = 64 * 1024;
 export async function readText(source: ByteSource, options: TextOptions = {}): Promise<RawTable> {
   const encoding = await detectEncoding(source);
   const { dialect, text } = await withDialect(decoded(source, encoding), options);
-  const rows = await parseRows(text, dialect.delimiter);
+  const rows = await parseRows(text, dialect.delimiter, options);
   if (rows.length === 0) throw new UnreadableTable('EMPTY', 'There is nothing in it but empty lines.');
   return {
     origin: 'TEXT',
@@ -68,7 +72,11 @@ async function withDialect(
   return { dialect, text: text() };
 }
 
-async function parseRows(text: AsyncGenerator<string>, delimiter: Delimiter): Promise<TableRow[]> {
+async function parseRows(
+  text: AsyncGenerator<string>,
+  delimiter: Delimiter,
+  { onRows, signal }: TextOptions,
+): Promise<TableRow[]> {
   const parser = parse({
     delimiter,
     relax_column_count: true,
@@ -86,6 +94,9 @@ async function parseRows(text: AsyncGenerator<string>, delimiter: Delimiter): Pr
       if (record.every(isBlank)) continue;
       if (rows.length >= MAX_ROWS) throw tooManyRows();
       rows.push({ number, cells: checked(record, number) });
+      if (rows.length % ROWS_PER_REPORT > 0) continue;
+      signal?.throwIfAborted();
+      onRows?.(rows.length);
     }
   } catch (error) {
     throw error instanceof CsvError ? unreadable(error, number + 1) : error;

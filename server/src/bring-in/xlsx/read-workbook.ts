@@ -17,6 +17,9 @@ export interface WorkbookOptions {
   limits?: Readonly<WorkbookLimits>;
   heapMiB?: number;
   wallMs?: number;
+  /** told how many rows were read so far */
+  onRows?: ((rows: number) => void) | undefined;
+  signal?: AbortSignal | undefined;
 }
 
 /**
@@ -59,10 +62,13 @@ function inChild(bytes: Uint8Array, options: WorkbookOptions): Promise<WorkbookR
     const rows: TableRow[] = [];
     const timer = setTimeout(() => reject(tooSlow()), wallMs);
     child.on('message', (report: Report) => {
-      if ('rows' in report) for (const row of report.rows) rows.push(row);
-      else if ('done' in report) resolve({ rows, ...report.done });
+      if ('rows' in report) {
+        for (const row of report.rows) rows.push(row);
+        options.onRows?.(rows.length);
+      } else if ('done' in report) resolve({ rows, ...report.done });
       else reject(new UnreadableTable(report.refused.code, report.refused.message));
     });
+    options.signal?.addEventListener('abort', () => reject(options.signal?.reason as Error), { once: true });
     child.on('error', () => reject(died()));
     child.on('exit', () => reject(died()));
     child.on('exit', () => clearTimeout(timer));
