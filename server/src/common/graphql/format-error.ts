@@ -19,7 +19,7 @@ const PASSING_CODES = new Set(['GRAPHQL_PARSE_FAILED', 'GRAPHQL_VALIDATION_FAILE
 
 /** Query-limit messages of the guard rules; they carry no code of their own. */
 const TOO_COSTLY =
-  /^Syntax Error: (Query (Cost|depth) limit|Aliases limit|Directives limit)|Document contains more than \d+ tokens/;
+  /(Query Cost|Query depth|Aliases|Directives) limit of \d+ exceeded|Document contains more tha[nt] \d+ tokens/;
 
 function answer(formatted: GraphQLFormattedError, code: string, message: string): GraphQLFormattedError {
   const { locations, path } = formatted;
