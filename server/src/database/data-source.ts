@@ -1,3 +1,6 @@
+import { readdirSync } from 'node:fs';
+import path from 'node:path';
+import { pathToFileURL } from 'node:url';
 import { DataSource, type DataSourceOptions } from 'typeorm';
 
 /** How long the server waits for PostgreSQL before it says so, ms. A database that hangs must not hang its callers. */
@@ -5,14 +8,31 @@ const CONNECT_TIMEOUT_MS = 2_000;
 const STATEMENT_TIMEOUT_MS = 60_000;
 const IDLE_IN_TRANSACTION_TIMEOUT_MS = 30_000;
 
-/** Entities and migrations by glob, so that this inner folder imports no feature. */
+type Constructor = new () => object;
+
+/**
+ * Entities and migrations by the names of their files, so that this inner folder imports no feature. They are imported
+ * here and not by TypeORM, whose `Function('… import …')` a second test file of one process cannot run.
+ */
+const entities = await classesIn(path.join(import.meta.dirname, '..'), /\.entity\.[jt]s$/);
+const migrations = await classesIn(path.join(import.meta.dirname, 'migrations'), /\d-[a-z-]+\.[jt]s$/);
+
+async function classesIn(folder: string, name: RegExp): Promise<Constructor[]> {
+  const files = readdirSync(folder, { recursive: true, encoding: 'utf8' }).filter((file) => name.test(file));
+  const modules = await Promise.all(
+    files.sort().map((file) => import(pathToFileURL(path.join(folder, file)).href) as Promise<Record<string, unknown>>),
+  );
+  return modules
+    .flatMap((module) => Object.values(module))
+    .filter((value) => typeof value === 'function') as Constructor[];
+}
+
 export function dataSourceOptions(url: string): DataSourceOptions {
-  const here = import.meta.dirname;
   return {
     type: 'postgres',
     url,
-    entities: [`${here}/../**/*.entity.{ts,js}`],
-    migrations: [`${here}/migrations/*.{ts,js}`],
+    entities,
+    migrations,
     migrationsRun: false,
     synchronize: false,
     installExtensions: false,

@@ -51,7 +51,7 @@ const PEOPLE = `
   );`;
 
 const SUBSTANCES = `
-  CREATE FUNCTION cas_number_is_valid(cas text) RETURNS boolean LANGUAGE plpgsql IMMUTABLE AS $$
+  CREATE FUNCTION cas_number_is_valid(cas text) RETURNS boolean LANGUAGE plpgsql IMMUTABLE STRICT AS $$
   DECLARE
     digits text := replace(cas, '-', '');
     total int := 0;
