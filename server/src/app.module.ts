@@ -8,6 +8,7 @@ import { ConfigModule } from './config/config.module.js';
 import { type Env } from './config/env.js';
 import { dataSourceOptions } from './database/data-source.js';
 import { DataSheetsModule } from './data-sheets/data-sheets.module.js';
+import { ExportsModule } from './exports/exports.module.js';
 import { FilesModule } from './files/files.module.js';
 import { FitsModule } from './fits/fits.module.js';
 import { HealthModule } from './health/health.module.js';
@@ -47,6 +48,7 @@ export class AppModule {
         DataSheetsModule,
         ReviewsModule,
         ReleasesModule,
+        ExportsModule,
         SubscriptionsModule,
         NodesModule,
         HomeModule,

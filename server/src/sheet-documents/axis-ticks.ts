@@ -48,7 +48,7 @@ export const temperatureAxis = (minimum: number, maximum: number): FigureAxis =>
 
 /** An axis from `lower` to `upper` about zero, or a little beyond, with figures at rounded steps. */
 export function deviationAxis(lower: number, upper: number): FigureAxis {
-  const step = roundStep(upper - lower, 6);
+  const step = roundStep(upper - lower, 8);
   const first = Math.min(-step, step * Math.floor(lower / step + 1e-9));
   const last = Math.max(step, step * Math.ceil(upper / step - 1e-9));
   // A quarter of a step of air lets the outermost figures stand clear of the edge.

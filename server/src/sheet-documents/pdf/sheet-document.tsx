@@ -26,6 +26,7 @@ interface SheetDocumentProps {
 /** The data sheet as a document worth printing, from its content alone. */
 export function SheetDocument({ content, paper }: SheetDocumentProps) {
   const { size, left, right, top, bottom } = PAPERS[paper];
+  const issuedAt = content.versions.find(({ isThis }) => isThis)?.date ?? null;
   return (
     <Document
       title={documentTitle(content)}
@@ -34,6 +35,8 @@ export function SheetDocument({ content, paper }: SheetDocumentProps) {
       language="en"
       creator={sheetStrings.publisher}
       producer={sheetStrings.publisher}
+      // The day of issue, not of printing: the same sheet is the same file.
+      {...(issuedAt === null ? {} : { creationDate: new Date(issuedAt), modificationDate: new Date(issuedAt) })}
     >
       <Page
         size={size}
