@@ -32,6 +32,20 @@ describe('the limits of the GraphQL API', () => {
     expect(response.body.data ?? null).toBeNull();
   });
 
+  it('counts a page size that comes in by a variable', async () => {
+    const query = nested(2).replaceAll('first: 1', 'first: $n').replace('{', 'query ($n: Int) {');
+    expect(codeOf(await ask({ query, variables: { n: 100 } }))).toBe('QUERY_TOO_COSTLY');
+    expect(codeOf(await ask({ query, variables: { n: 1 } }))).toBeUndefined();
+  });
+
+  it('lets a full page of sheets with their correlations through', async () => {
+    const query = `{ dataSheets(first: 100) { edges { node { code pair { substances { name formula } } current { number releasedAt
+      correlation { expression parameters { symbol value standardUncertainty unit } covariance validity { temperatureMinimum
+      temperatureMaximum pressureMinimum pressureMaximum } evaluate(temperatures: [300], pressures: [101325]) { diffusivities
+      standardUncertainties } } } } } } }`;
+    expect((await ask({ query })).body).toEqual({ data: { dataSheets: { edges: [] } } });
+  });
+
   it('answers introspection, because the contract is public', async () => {
     const response = await ask({ query: getIntrospectionQuery({ inputValueDeprecation: true, oneOf: true }) });
     expect(response.status).toBe(200);

@@ -15,11 +15,16 @@ const CODE_OF_STATUS: Record<number, ApiErrorCode> = {
 };
 
 /** Codes that GraphQL and Apollo give themselves and that may pass. */
-const PASSING_CODES = new Set(['GRAPHQL_PARSE_FAILED', 'GRAPHQL_VALIDATION_FAILED', 'BAD_USER_INPUT', 'BAD_REQUEST']);
+const PASSING_CODES = new Set([
+  'QUERY_TOO_COSTLY',
+  'GRAPHQL_PARSE_FAILED',
+  'GRAPHQL_VALIDATION_FAILED',
+  'BAD_USER_INPUT',
+  'BAD_REQUEST',
+]);
 
 /** Query-limit messages of the guard rules; they carry no code of their own. */
-const TOO_COSTLY =
-  /(Query Cost|Query depth|Aliases|Directives) limit of \d+ exceeded|Document contains more tha[nt] \d+ tokens/;
+const TOO_COSTLY = /(Query depth|Aliases|Directives) limit of \d+ exceeded|Document contains more tha[nt] \d+ tokens/;
 
 function answer(formatted: GraphQLFormattedError, code: string, message: string): GraphQLFormattedError {
   const { locations, path } = formatted;

@@ -7,15 +7,17 @@ import { specifiedDirectives } from 'graphql';
 import { FloatColumnScalar } from './float-column.scalar.js';
 import { formatError } from './format-error.js';
 import { Node } from './node.js';
+import { QueryCostPlugin } from './query-cost.plugin.js';
 
 /** What one request may ask for; measured so that the worst admitted query stays cheap. */
-const LIMITS = { tokens: 1_000, depth: 12, aliases: 15, directives: 20, cost: 5_000 };
+const LIMITS = { tokens: 1_000, depth: 12, aliases: 15, directives: 20 };
 
 const armor = new ApolloArmor({
   maxDepth: { n: LIMITS.depth, flattenFragments: true },
-  costLimit: { maxCost: LIMITS.cost, flattenFragments: true },
   maxAliases: { n: LIMITS.aliases },
   maxDirectives: { n: LIMITS.directives },
+  // It counts no page sizes that come in by variables; QueryCostPlugin does.
+  costLimit: { enabled: false },
   // Apollo's own limit answers 400 where this one answers 500, and its suggestions are switched off below.
   maxTokens: { enabled: false },
   blockFieldSuggestion: { enabled: false },
@@ -37,7 +39,7 @@ const armor = new ApolloArmor({
       hideSchemaDetailsFromClientErrors: false,
       parseOptions: { maxTokens: LIMITS.tokens },
       validationRules: armor.validationRules,
-      plugins: armor.plugins as unknown as NonNullable<ApolloDriverConfig['plugins']>,
+      plugins: [...armor.plugins, new QueryCostPlugin()] as unknown as NonNullable<ApolloDriverConfig['plugins']>,
       buildSchemaOptions: { directives: [...specifiedDirectives], orphanedTypes: [Node] },
       context: (req: FastifyRequest, res: FastifyReply) => ({ req, res }),
       formatError,
