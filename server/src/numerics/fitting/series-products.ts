@@ -11,7 +11,10 @@ export interface TangentColumns {
 }
 
 /** The weighted cross products of each series. */
-export function seriesProducts(columns: FitColumns, tangent: TangentColumns): SeriesProducts[] {
+export function seriesProducts(
+  columns: Pick<FitColumns, 'count' | 'seriesCount' | 'seriesStart'>,
+  tangent: TangentColumns,
+): SeriesProducts[] {
   return Array.from({ length: columns.seriesCount }, (_, s) =>
     productsOf(tangent, columns.count, columns.seriesStart[s]!, columns.seriesStart[s + 1]!, tangent.common[s]!),
   );

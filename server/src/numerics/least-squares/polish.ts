@@ -29,7 +29,9 @@ const CONVERGED_OFFSET = 1e-10;
 /** A relative step this short moves no digit that is asked for; it decides where the residuals are rounding noise. */
 const CONVERGED_STEP = 1e-11;
 const SMALL_OFFSET = 1e-3;
-const STEPS_WITHOUT_GAIN = 4;
+const STEPS_WITHOUT_GAIN = 2;
+/** Steps this short, relative to the parameters, are rounding. */
+const ROUNDING = 4 * Number.EPSILON;
 
 /** One linearisation: the Gauss–Newton step, and what tells how far the point is from the minimum. */
 interface Linearisation {
@@ -158,7 +160,7 @@ function gaussNewton(problem: WhitenedProblem, start: Float64Array): Polished {
       best = { parameters, sumOfSquares, relativeOffset: at.relativeOffset, stepLength, isConverged };
       sinceBest = -1;
     }
-    if (stepLength === 0) break;
+    if (stepLength <= ROUNDING) break;
     parameters = next;
   }
   return (

@@ -23,7 +23,7 @@ export interface LeastSquaresSolution {
   readonly unscaledCovariance: number[][];
   /** Bates & Watts' relative offset at the solution */
   readonly relativeOffset: number;
-  /** Ratio of the extreme singular values of the column-scaled Jacobian */
+  /** Condition number of the column-scaled Jacobian, in the Frobenius norm: at least the ratio of its singular values */
   readonly condition: number;
 }
 

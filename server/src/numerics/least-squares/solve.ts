@@ -1,5 +1,4 @@
-import { SingularValueDecomposition, Matrix } from 'ml-matrix';
-import { type QrFactors } from '../linear-algebra/qr.js';
+import { inverseGram } from '../linear-algebra/qr.js';
 import { covarianceAt, linearise, polish, type Polished } from './polish.js';
 import { WhitenedProblem, type LeastSquaresProblem, type LeastSquaresSolution } from './problem.js';
 import { standardNormals } from '../random/normals.js';
@@ -18,7 +17,7 @@ const SEED = 1;
 
 /** Tried one after the other until one converges. */
 const ATTEMPTS: readonly (WarmStartOptions & { readonly polishSteps: number })[] = [
-  { iterations: 12, damping: 1e-2, polishSteps: 300 },
+  { iterations: 4, damping: 1e-2, polishSteps: 300 },
   { iterations: 0, damping: 1, polishSteps: 1000 },
   { iterations: 300, damping: 1, polishSteps: 2000 },
 ];
@@ -90,16 +89,11 @@ function describe(problem: WhitenedProblem, polished: Polished): LeastSquaresSol
     degreesOfFreedom: problem.count - problem.parameterCount,
     unscaledCovariance: covarianceAt(at),
     relativeOffset: polished.relativeOffset,
-    condition: conditionOf(at.factors),
+    condition: conditionOf(inverseGram(at.factors)),
   };
 }
 
-/** Condition number of R. */
-function conditionOf({ rows, columns, vectors, diagonal }: QrFactors): number {
-  const triangle = new Matrix(columns, columns);
-  for (let k = 0; k < columns; k++) {
-    for (let i = 0; i < k; i++) triangle.set(i, k, vectors[k * rows + i]!);
-    triangle.set(k, k, diagonal[k]!);
-  }
-  return new SingularValueDecomposition(triangle).condition;
+/** |R| |R⁻¹| in the Frobenius norm, of an R whose columns have unit length: √n √tr (RᵀR)⁻¹. */
+function conditionOf(inverse: readonly (readonly number[])[]): number {
+  return Math.sqrt(inverse.length * inverse.reduce((trace, row, k) => trace + row[k]!, 0));
 }
