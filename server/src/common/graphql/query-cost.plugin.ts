@@ -17,8 +17,8 @@ function pageEstimator({ args, childComplexity, field }: ComplexityEstimatorArgs
 const ESTIMATORS = [pageEstimator, simpleEstimator({ defaultComplexity: 1 })];
 
 /** Only a page size can come in by a variable; without one the cost is the document's own and is remembered. */
-const hasPageVariable = (operation: OperationDefinitionNode) =>
-  operation.variableDefinitions?.some(({ type }) => /^Int!?$/.test(printType(type))) ?? false;
+const hasPageVariable = (operation: OperationDefinitionNode | undefined) =>
+  operation?.variableDefinitions?.some(({ type }) => /^Int!?$/.test(printType(type))) ?? false;
 
 function printType(type: NonNullable<OperationDefinitionNode['variableDefinitions']>[number]['type']): string {
   if (type.kind === 'NamedType') return type.name.value;
