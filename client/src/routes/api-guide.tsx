@@ -1,1 +1,2 @@
-export const Component = () => null;
+/** /api-guide */
+export { ApiGuidePage as Component } from '../features/api-guide/api-guide-page';

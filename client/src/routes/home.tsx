@@ -1,1 +1,2 @@
-export const Component = () => null;
+/** /home */
+export { HomePage as Component } from '../features/home/home-page';

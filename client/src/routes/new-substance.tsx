@@ -1,1 +1,2 @@
-export const Component = () => null;
+/** /substances/new */
+export { NewSubstancePage as Component } from '../features/substances/substance-edit-pages';

@@ -7,6 +7,7 @@ export const sheetStrings = {
   failed: 'The sheet could not be loaded.',
 
   margin: {
+    state: 'State',
     from: 'Where it came from',
     take: 'Take it with you',
     identity: 'Identity of this text',
@@ -26,7 +27,6 @@ export const sheetStrings = {
     axisNote:
       'The coloured part of the temperature axis is the validity range. Outside it the fit is drawn broken and every value is flagged.',
     uncertainty: 'Uncertainty',
-    notIncluded: 'Not included',
     trace: 'Trace any number',
     traceNote: 'Every series opens to its points; points reduced here open to the tube run and its readings.',
   },

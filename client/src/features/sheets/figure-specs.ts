@@ -1,11 +1,12 @@
 import { type FiguresDataFragment } from '../../gql/graphql';
 import { fill } from '../../lib/fill';
-import { formatShort, formatSigned, withUnit } from '../../lib/format-quantity';
+import { formatNumber, formatShort, formatSigned, withUnit } from '../../lib/format-quantity';
 import { type TextRun, typeset } from '../../lib/typeset';
 import { fromSi, type ReaderUnits, unitLabel } from '../../lib/units';
 import { sheetStrings } from '../../strings/sheets';
 import { type AxisSpec, type FigureSpec, type LineMark, type Mark, type PointsMark } from '../../ui/figure/spec';
 import { readerTicks } from '../../ui/figure/ticks';
+import { mostPlaces } from '../../ui/numbers/aligned';
 
 type Figures = FiguresDataFragment;
 const words = sheetStrings.figures;
@@ -190,10 +191,13 @@ const temperatureAxis =
 
 function diffusivityAxis(figures: Figures, units: ReaderUnits): AxisSpec {
   const range = { min: figures.diffusivityAxis.minimum, max: figures.diffusivityAxis.maximum, logarithmic: true };
+  const ticks = readerTicks('diffusivity', range, units.diffusivity, 6);
+  // All figures of the axis to the places of the one that has most.
+  const places = mostPlaces(ticks.map((tick) => formatShort(onAxis(tick, units), 4)));
   return {
     ...range,
-    ticks: readerTicks('diffusivity', range, units.diffusivity, 6),
-    format: (value) => printedDiffusivity(value, units),
+    ticks,
+    format: (value) => formatNumber(onAxis(value, units), places),
     title: diffusivityTitle(figures.pressure, units),
   };
 }
@@ -201,8 +205,8 @@ function diffusivityAxis(figures: Figures, units: ReaderUnits): AxisSpec {
 /** On the axis m²/s is scaled by 10⁻⁶, so that its figures can be read. */
 const AXIS_POWER = { m2_s: 1e6, cm2_s: 1, mm2_s: 1 } as const;
 
-const printedDiffusivity = (value: number, units: ReaderUnits): string =>
-  formatShort(fromSi('diffusivity', value, units.diffusivity) * AXIS_POWER[units.diffusivity], 4);
+const onAxis = (value: number, units: ReaderUnits): number =>
+  fromSi('diffusivity', value, units.diffusivity) * AXIS_POWER[units.diffusivity];
 
 function diffusivityTitle(pressure: number, units: ReaderUnits): TextRun[] {
   const unit =

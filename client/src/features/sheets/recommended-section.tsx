@@ -40,9 +40,6 @@ export function RecommendedSection({ number, title, content, file }: Recommended
           <MarginBlock title={sheetStrings.margin.uncertainty}>
             <Paragraphs paragraphs={content.uncertainty.statement} />
           </MarginBlock>
-          <MarginBlock title={sheetStrings.margin.notIncluded}>
-            <Paragraphs paragraphs={content.uncertainty.notIncluded} />
-          </MarginBlock>
         </>
       }
     >

@@ -21,10 +21,8 @@ interface MarginProps {
 
 /** State, version, ranges, dates, people: as the sheet states them, ranges in the reader's units. */
 export function StandingBlock({ version }: MarginProps) {
-  const { range, margin, versions } = version.content;
-  const word = versions.find((row) => row.isThis)?.word;
+  const { range, margin } = version.content;
   const shown = (value: string): ReactNode => {
-    if (value === word) return <StateMark state={stateOf(version.status)} />;
     const [first] = value.split(', ');
     if (value.includes(' to ') && first?.includes('Pa')) {
       return (
@@ -42,7 +40,9 @@ export function StandingBlock({ version }: MarginProps) {
     <Runs key="label" runs={label} />,
     shown(value),
   ]);
-  return <MarginBlock entries={entries} />;
+  return (
+    <MarginBlock entries={[[words.state, <StateMark key="state" state={stateOf(version.status)} />], ...entries]} />
+  );
 }
 
 /** PDF, CSV, JSON; plain links where anyone may have them. */
@@ -103,7 +103,7 @@ export function IdentityBlock({ version }: { readonly version: SheetPageFragment
 }
 
 /** Where researchers and editors go on from here. */
-export function WorkBlock({ version, code, pairId }: MarginProps & { readonly pairId: string }) {
+export function WorkBlock({ version, pairId }: MarginProps & { readonly pairId: string }) {
   const person = usePerson();
   if (!hasRole(person, 'RESEARCHER', 'EDITOR')) return null;
   const { status } = version;

@@ -58,7 +58,7 @@ function xAxis({ index, x, look, width }: Panel, isLast: boolean) {
     },
     axisLabel: { ...labels(x, look, width), show: isLast, margin: 9 },
     ...(isLast ? { name: rich(x.title), nameLocation: 'end', nameGap: 0 } : {}),
-    nameTextStyle: { ...titleStyle(look), align: 'right', verticalAlign: 'top', padding: [13, 0, 0, 0] },
+    nameTextStyle: { ...titleStyle(look), align: 'right', verticalAlign: 'top', padding: [10, 0, 0, 0] },
   };
 }
 

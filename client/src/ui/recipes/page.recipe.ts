@@ -184,7 +184,7 @@ export const sectionRecipe = defineSlotRecipe({
       color: 'ink3',
       fontFeatureSettings: '"tnum"',
     },
-    column: { gridColumn: 2, minWidth: 0, '& > h2 + *': { marginTop: '12px' }, '& > p': { maxWidth: '640px' } },
+    column: { gridColumn: 2, minWidth: 0, '& > h2 + *': { marginTop: '12px' }, '& > p': { maxWidth: '640px' }, '& > p + p': { marginTop: '10px' } },
     heading: { textStyle: 'section', '& a': { textDecoration: 'none' } },
     margin: { gridColumn: 4, marginTop: { base: '20px', md: 0 }, textStyle: 'margin', color: 'ink2' },
   },
