@@ -6,7 +6,7 @@ import { lnDeviations, relativeResiduals, relativeVariances, variancesFollowFit,
 import { type BetweenSeries, type FitRecipe } from './fit.types.js';
 import { tangentFit } from './point-fit.js';
 import { fitPooled, LEAST_SCATTER } from './pooled-fit.js';
-import { likelihoodAt, type SeriesProducts } from './restricted-likelihood.js';
+import { betweenCovariance, likelihoodAt, type SeriesProducts } from './restricted-likelihood.js';
 import { seriesProducts } from './series-products.js';
 import { fitComponents, type ComponentModel, type FittedComponents } from './variance-components.js';
 
@@ -99,7 +99,7 @@ function estimateOf(task: FitTask, round: TangentFit, beta: Float64Array): Estim
   return {
     beta,
     covariance: scaled(at.covariance, unit ** 2),
-    knownCovariance: isAssigned ? scaled(at.betweenCovariance, unit ** 2) : zeros(beta.length),
+    knownCovariance: isAssigned ? scaled(betweenCovariance(products, components, at), unit ** 2) : zeros(beta.length),
     degreesOfFreedom: isAssigned ? withinFreedom(task) : columns.seriesCount - 1,
     pointCovariance: pointCovariance(task, beta, variances),
     variances,
@@ -134,7 +134,8 @@ function withinFreedom({ columns, form }: FitTask): number {
 function predictedDeviation({ products, fitted, unit, spread }: TangentFit, s: number, x: number): number {
   const { between } = fitted.components;
   const intercept = between.intercept + products[s]!.commonVariance;
-  const [q0, q1] = fitted.at.pulls[s]!;
+  const q0 = fitted.at.pulls[2 * s]!;
+  const q1 = fitted.at.pulls[2 * s + 1]!;
   const shift = intercept * q0 + between.covariance * q1;
   const tilt = between.covariance * q0 + between.slope * q1;
   return unit * (shift + (tilt * x) / spread);

@@ -23,9 +23,9 @@ export function seriesProducts(
 function productsOf(tangent: TangentColumns, rows: number, from: number, to: number, common: number): SeriesProducts {
   const { design, slope, response, variances } = tangent;
   const size = design.length / rows;
-  const xx = Array.from({ length: size }, () => new Array<number>(size).fill(0));
-  const xz = Array.from({ length: size }, () => [0, 0]);
-  const xy = new Array<number>(size).fill(0);
+  const xx = new Float64Array(size * size);
+  const xz = new Float64Array(2 * size);
+  const xy = new Float64Array(size);
   const zz = { intercept: 0, covariance: 0, slope: 0 };
   let y0 = 0;
   let y1 = 0;
@@ -42,9 +42,9 @@ function productsOf(tangent: TangentColumns, rows: number, from: number, to: num
     yy += weight * y * y;
     for (let k = 0; k < size; k++) {
       const weighted = weight * design[k * rows + i]!;
-      for (let l = 0; l < size; l++) xx[k]![l]! += weighted * design[l * rows + i]!;
-      xz[k]![0]! += weighted;
-      xz[k]![1]! += weighted * z;
+      for (let l = 0; l < size; l++) xx[k * size + l]! += weighted * design[l * rows + i]!;
+      xz[2 * k]! += weighted;
+      xz[2 * k + 1]! += weighted * z;
       xy[k]! += weighted * y;
     }
   }

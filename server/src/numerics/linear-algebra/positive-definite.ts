@@ -5,10 +5,6 @@ export interface Symmetric2 {
   readonly slope: number;
 }
 
-export function fromSymmetric(element: (key: keyof Symmetric2) => number): Symmetric2 {
-  return { intercept: element('intercept'), covariance: element('covariance'), slope: element('slope') };
-}
-
 /**
  * Inverse and ln determinant of a small symmetric positive-definite matrix, by Cholesky; NaN where it is not positive
  * definite. Only the lower triangle is read.
