@@ -15,7 +15,10 @@ interface Chunk {
 /** What a first visit to a released sheet's page loads before its figures are drawn: scripts and styles, gzip. */
 export async function benchFirstLoad(): Promise<BenchRow[]> {
   const dist = path.resolve(import.meta.dirname, '../../../client/dist');
-  const manifest = JSON.parse(await fs.readFile(path.join(dist, '.vite/manifest.json'), 'utf8')) as Record<string, Chunk>;
+  const manifest = JSON.parse(await fs.readFile(path.join(dist, '.vite/manifest.json'), 'utf8')) as Record<
+    string,
+    Chunk
+  >;
   const files = new Set<string>(['index.html']);
   const seen = new Set<string>();
   const visit = (name: string) => {

@@ -58,20 +58,26 @@ export function pointProblems(points: readonly IncomingPoint[]): Problem[] {
 }
 
 function duplicateWarnings(points: readonly IncomingPoint[]): Warning[] {
-  const seen = new Map<string, number>();
   const warnings: Warning[] = [];
-  points.forEach((point, i) => {
-    const key = `${point.temperature} ${point.pressure} ${point.diffusivity}`;
-    const earlier = seen.get(key);
-    if (earlier === undefined) seen.set(key, i);
-    else
-      warnings.push({
-        code: 'DUPLICATE_POINT',
-        message: `Point ${i + 1} repeats point ${earlier + 1}: same T, P and D.`,
-        path: `points.${i}`,
-      });
-  });
+  for (const [index, first] of repeats(points)) {
+    const message = `Point ${index + 1} repeats point ${first + 1}: same T, P and D.`;
+    warnings.push({ code: 'DUPLICATE_POINT', message, path: `points.${index}` });
+  }
   return warnings;
+}
+
+/** Places of the points that were there before, in order, each with that of the first. Sorting is cheaper than keys of text. */
+function repeats(points: readonly IncomingPoint[]): [index: number, first: number][] {
+  const difference = (a: IncomingPoint, b: IncomingPoint): number =>
+    a.temperature - b.temperature || a.diffusivity - b.diffusivity || a.pressure - b.pressure;
+  const order = [...points.keys()].sort((i, j) => difference(points[i]!, points[j]!) || i - j);
+  const found: [number, number][] = [];
+  let first = order[0] ?? 0;
+  for (const index of order.slice(1)) {
+    if (difference(points[first]!, points[index]!) === 0) found.push([index, first]);
+    else first = index;
+  }
+  return found.sort(([i], [j]) => i - j);
 }
 
 function slipWarnings(points: readonly IncomingPoint[]): Warning[] {

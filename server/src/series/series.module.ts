@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { MailModule } from '../mail/mail.module.js';
 import { PairsModule } from '../pairs/pairs.module.js';
 import { PeopleModule } from '../people/people.module.js';
 import { SeriesPointsStore } from './series-points.store.js';
@@ -6,7 +7,7 @@ import { PairSeriesResolver, SeriesEventsResolver, SeriesResolver } from './seri
 import { SeriesService } from './series.service.js';
 
 @Module({
-  imports: [PairsModule, PeopleModule],
+  imports: [MailModule, PairsModule, PeopleModule],
   providers: [SeriesService, SeriesPointsStore, SeriesResolver, SeriesEventsResolver, PairSeriesResolver],
   exports: [SeriesService, SeriesPointsStore],
 })

@@ -5,7 +5,10 @@ import { type Page } from '../common/graphql/connection.js';
 import { isId } from '../common/graphql/node.js';
 import { accepted, type Outcome, problem, type Problem, refused, type Warning } from '../common/problem.js';
 import { hasRole, isOfTheGroup, type Viewer } from '../common/viewer.js';
+import { MailService } from '../mail/mail.service.js';
+import { PublicAddressService } from '../mail/public-address.service.js';
 import { PairsService } from '../pairs/pairs.service.js';
+import { Person } from '../people/person.entity.js';
 import { type IncomingPoint, pointProblems, pointWarnings } from './series-point-rules.js';
 import { usualRelativeUncertainty } from './measurement-methods.js';
 import { type NewSeriesPoint, SeriesPointsStore } from './series-points.store.js';
@@ -90,6 +93,8 @@ export class SeriesService {
     private readonly dataSource: DataSource,
     private readonly pairs: PairsService,
     private readonly points: SeriesPointsStore,
+    private readonly mail: MailService,
+    private readonly addresses: PublicAddressService,
   ) {}
 
   /** Batch function for `loaderFor`: one entry per id, in the order asked, whoever asks. */
@@ -235,7 +240,18 @@ export class SeriesService {
       if (action === 'submit') series.submittedById = viewer.id;
       const saved = await tx.save(series);
       await this.record(tx, saved, action, remark, viewer);
+      if (action === 'return') await this.tellOwner(tx, saved, remark ?? '', viewer);
       return accepted(saved);
+    });
+  }
+
+  private async tellOwner(tx: EntityManager, series: Series, remark: string, viewer: Viewer): Promise<void> {
+    const owner = await tx.findOneByOrFail(Person, { id: series.createdById });
+    const editor = await tx.findOneByOrFail(Person, { id: viewer.id });
+    await this.mail.enqueue(tx, {
+      to: owner.email,
+      template: 'seriesReturned',
+      values: { series: series.title, remark, by: editor.name, link: this.addresses.linkTo(`/series/${series.id}`) },
     });
   }
 
