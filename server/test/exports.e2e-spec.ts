@@ -232,6 +232,12 @@ describe('data sheets as files', () => {
       });
     });
 
+    it('is open to an API key, which reads', async () => {
+      const { accessToken } = await server.signIn('modeller@demo.example', DEMO_PASSWORD);
+      const { data } = await server.ask('mutation { createApiKey(name: "reactor model") { secret } }', {}, accessToken);
+      await evaluateAt(states).set('Authorization', `Bearer ${data!['createApiKey'].secret}`).expect(200);
+    });
+
     it('takes 10,000 states at once', async () => {
       const temperatures = Array.from({ length: 10_000 }, (_, i) => 290 + i / 1000);
       const answer = await evaluateAt({ temperatures, pressures: [101_325] }).expect(200);
