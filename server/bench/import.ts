@@ -127,9 +127,8 @@ async function understandTable(bytes: Buffer): Promise<UnderstoodPoint[]> {
 }
 
 /** The points checked and kept as a series, whole. */
-async function store({ dataSource, personId }: Bench, points: readonly UnderstoodPoint[]): Promise<void> {
-  const pairs = new PairsService(dataSource, new SubstancesService(dataSource));
-  const series = new SeriesService(dataSource, pairs, new SeriesPointsStore(dataSource));
+async function store({ app, personId }: Bench, points: readonly UnderstoodPoint[]): Promise<void> {
+  const series = app.get(SeriesService, { strict: false });
   const viewer = { id: personId, roles: ['RESEARCHER'], viaApiKey: false } as const;
   const header = {
     a: { name: 'ethanol' },
@@ -159,7 +158,8 @@ export async function benchImport(databaseUrl: string): Promise<BenchRow[]> {
     }
   } finally {
     await bench.client.end();
-    await bench.dataSource.destroy();
+    await bench.app.close();
+    await fs.rm(bench.dataFolder, { recursive: true, force: true });
   }
   return rowsOf(medianOf(copies), medianOf(understandings), medianOf(stores));
 }
