@@ -13,7 +13,7 @@ export const paths = {
   forgottenPassword: () => '/reset-password',
   resetPassword: (token: string) => `/reset-password/${segment(token)}`,
   apiGuide: (code?: string, number?: string) =>
-    code ? `/api?sheet=${segment(code)}${number ? `&version=${segment(number)}` : ''}` : '/api',
+    code ? `/api-guide?sheet=${segment(code)}${number ? `&version=${segment(number)}` : ''}` : '/api-guide',
   explorer: () => '/graphql',
   home: () => '/home',
   substances: (search?: string) => (search ? `/substances?search=${segment(search)}` : '/substances'),
@@ -23,16 +23,19 @@ export const paths = {
   pairs: () => '/pairs',
   pair: (id: string) => `/pairs/${segment(id)}`,
   seriesList: () => '/series',
-  newSeries: () => '/series/new',
+  newSeries: (pairId?: string) => (pairId ? `/bring-in?pair=${segment(pairId)}` : '/bring-in'),
   series: (id: string) => `/series/${segment(id)}`,
+  editSeries: (id: string) => `/series/${segment(id)}/edit`,
   fit: (id: string) => `/fits/${segment(id)}`,
   compareFits: (ids: readonly string[]) => `/fits/compare?fits=${ids.map(segment).join(',')}`,
-  editVersion: (code: string, number: string) => `/sheets/${segment(code)}/${segment(number)}/edit`,
-  review: (code: string, number: string) => `/sheets/${segment(code)}/${segment(number)}/review`,
-  releaseVersion: (code: string, number: string) => `/sheets/${segment(code)}/${segment(number)}/release`,
-  withdrawVersion: (code: string, number: string) => `/sheets/${segment(code)}/${segment(number)}/withdraw`,
+  draftVersion: (fitId: string) => `/fits/${segment(fitId)}/draft`,
+  editVersion: (id: string) => `/versions/${segment(id)}/edit`,
+  review: (id: string) => `/versions/${segment(id)}/review`,
+  releaseVersion: (id: string) => `/versions/${segment(id)}/release`,
+  withdrawVersion: (id: string) => `/versions/${segment(id)}/withdraw`,
   people: () => '/people',
   mail: () => '/mail',
+  jobs: () => '/jobs',
 } as const;
 
 /** An address of this client to go on to, or the fallback: never another site. */

@@ -6,7 +6,7 @@ import { Failed } from '../feedback/states';
 import { WordButton } from '../form/button';
 import { figureRecipe } from '../recipes/content.recipe';
 import { DataTable, type DataColumn } from '../table/data-table';
-import { Plot } from './plot';
+import { Plot, type ChosenBy } from './plot';
 import { type FigureSpec } from './spec';
 
 interface FigureProps {
@@ -23,10 +23,12 @@ interface FigureProps {
   readonly reading: (pointId: string) => ReactNode;
   /** The point chosen, where the page keeps it. */
   readonly selected?: string | null;
-  readonly onSelect?: (pointId: string | null) => void;
+  readonly onSelect?: (pointId: string | null, by: ChosenBy) => void;
   readonly keys?: ReactNode;
   /** No caption and tools: the page shows them itself. */
   readonly bare?: boolean;
+  /** Of a bare figure: its data are shown as a table. */
+  readonly dataOpen?: boolean;
 }
 
 /** The one frame of every figure: caption, tools, drawing, reading, keys, and its data as a table. */
@@ -42,6 +44,7 @@ export function Figure({
   onSelect,
   keys,
   bare = false,
+  dataOpen = false,
 }: FigureProps) {
   const styles = useSlotRecipe({ recipe: figureRecipe })();
   const [dataShown, setDataShown] = useState(false);
@@ -49,7 +52,7 @@ export function Figure({
   const chosen = selected === undefined ? own : selected;
   const captionId = useId();
   return (
-    <chakra.figure css={styles.root} aria-labelledby={captionId}>
+    <chakra.figure css={styles.root} {...(bare ? { 'aria-label': description } : { 'aria-labelledby': captionId })}>
       {!bare && (
         <chakra.div css={styles.bar}>
           <chakra.figcaption css={styles.caption} id={captionId}>
@@ -66,12 +69,14 @@ export function Figure({
         </chakra.div>
       )}
       {/* The reading stands above the drawing: a sentence, not a floating box. */}
-      <chakra.div css={styles.reading} role="status">
-        {chosen === null ? <chakra.span color="ink3">{uiStrings.readingHint}</chakra.span> : reading(chosen)}
-      </chakra.div>
+      {hasPoints(spec) && (
+        <chakra.div css={styles.reading} role="status">
+          {chosen === null ? <chakra.span color="ink3">{uiStrings.readingHint}</chakra.span> : reading(chosen)}
+        </chakra.div>
+      )}
       <Plot spec={spec} description={description} selected={chosen} onSelect={onSelect ?? setOwn} />
       {keys}
-      {dataShown && (
+      {(dataShown || dataOpen) && (
         <chakra.div css={styles.data}>
           <FigureData data={data} file={file} label={`${uiStrings.figure} ${number}`} />
         </chakra.div>
@@ -79,6 +84,9 @@ export function Figure({
     </chakra.figure>
   );
 }
+
+const hasPoints = ({ panels }: FigureSpec): boolean =>
+  panels.some(({ marks }) => marks.some(({ kind }) => kind === 'points'));
 
 interface ToolsProps {
   readonly spec: FigureSpec;

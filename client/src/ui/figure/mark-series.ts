@@ -7,6 +7,7 @@ import { type Look } from './look';
 import {
   type AxisSpec,
   type BandMark,
+  type ExtentMark,
   type FigurePoint,
   type LabelMark,
   type LineMark,
@@ -43,6 +44,8 @@ export function markSeries(mark: Mark, panel: Panel): Series[] {
       return [band(mark, panel)];
     case 'points':
       return points(mark, panel);
+    case 'extent':
+      return [extent(mark, panel)];
     case 'label':
       return mark.wideOnly && isNarrow(panel.width) ? [] : [label(mark, panel)];
   }
@@ -79,7 +82,7 @@ const segment = ([x1, y1]: Pixel, [x2, y2]: Pixel, style: object) => ({
 
 export const gridLines = (panel: Panel): CustomSeriesOption =>
   shapes(panel, LAYER.grid, false, (at) =>
-    panel.y.ticks.map((tick) => {
+    (panel.y.bare ? [] : panel.y.ticks).map((tick) => {
       const [, y] = at(panel.x.min, tick);
       const crisp = Math.round(y) + 0.5;
       return segment([panel.box.left, crisp], [panel.box.right, crisp], { stroke: panel.look.rule, lineWidth: 1 });
@@ -226,24 +229,39 @@ const label = (mark: LabelMark, panel: Panel): CustomSeriesOption =>
     return [{ type: 'text', style }];
   });
 
-const RULE_STEPS = 48;
+const extent = (mark: ExtentMark, panel: Panel): CustomSeriesOption =>
+  shapes(panel, LAYER.line, true, (at) => {
+    const [start, y] = at(mark.low, mark.y);
+    const [end] = at(mark.high, mark.y);
+    if (!mark.open) return rampPieces(mark, panel, at, y, 3);
+    return [segment([start, y], [end, y], { stroke: panel.look.ink3, lineWidth: 1, lineDash: [3, 3] })];
+  });
 
 /** The temperature rule on the axis: coloured only where the correlation holds. */
-export function temperatureBand(
+export const temperatureBand = (
   range: { readonly low: number; readonly high: number },
   panel: Panel,
-): CustomSeriesOption {
-  return shapes(panel, LAYER.rule, false, (at) =>
-    Array.from({ length: RULE_STEPS }, (_, i) => {
-      const from = range.low + ((range.high - range.low) * i) / RULE_STEPS;
-      const to = range.low + ((range.high - range.low) * (i + 1)) / RULE_STEPS;
-      const [start] = at(from, panel.y.min);
-      const [end] = at(to, panel.y.min);
-      return {
-        type: 'rect',
-        shape: { x: start, y: panel.box.bottom - 2.5, width: end - start + 0.6, height: 5 },
-        style: { fill: temperatureColour((from + to) / 2, panel.look.edition) },
-      };
-    }),
-  );
+): CustomSeriesOption => shapes(panel, LAYER.rule, false, (at) => rampPieces(range, panel, at, panel.box.bottom, 5));
+
+const RULE_STEPS = 48;
+
+/** A horizontal band in the colours of its temperatures. */
+function rampPieces(
+  range: { readonly low: number; readonly high: number },
+  panel: Panel,
+  at: (x: number, y: number) => Pixel,
+  y: number,
+  height: number,
+): object[] {
+  return Array.from({ length: RULE_STEPS }, (_, i) => {
+    const from = range.low + ((range.high - range.low) * i) / RULE_STEPS;
+    const to = range.low + ((range.high - range.low) * (i + 1)) / RULE_STEPS;
+    const [start] = at(from, panel.y.min);
+    const [end] = at(to, panel.y.min);
+    return {
+      type: 'rect',
+      shape: { x: start, y: y - height / 2, width: end - start + 0.6, height },
+      style: { fill: temperatureColour((from + to) / 2, panel.look.edition) },
+    };
+  });
 }

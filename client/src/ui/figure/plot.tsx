@@ -9,11 +9,14 @@ import { figureOption } from './option';
 import { type FigureSpec } from './spec';
 import { useNearScreen } from './use-near-screen';
 
+/** How a point was chosen: passed over by the mouse, pressed, or walked to by a key. */
+export type ChosenBy = 'hover' | 'press' | 'key';
+
 interface PlotProps {
   readonly spec: FigureSpec;
   readonly description: string;
   readonly selected: string | null;
-  readonly onSelect: (pointId: string | null) => void;
+  readonly onSelect: (pointId: string | null, by: ChosenBy) => void;
 }
 
 /** The drawing itself, redrawn for its width; pointer, touch and arrow keys choose a point. */
@@ -23,16 +26,16 @@ export function Plot({ spec, description, selected, onSelect }: PlotProps) {
   const layout = useMemo(() => figureLayout(spec, width), [spec, width]);
   const points = useMemo(() => placedPoints(spec, layout), [spec, layout]);
 
-  const choose = (event: PointerEvent<HTMLDivElement>) => {
+  const choose = (event: PointerEvent<HTMLDivElement>, by: ChosenBy) => {
     const box = event.currentTarget.getBoundingClientRect();
     const near = nearestPoint(points, event.clientX - box.left, event.clientY - box.top);
-    if (near !== null) onSelect(near.point.id);
+    if (near !== null) onSelect(near.point.id, by);
   };
   const walk = (event: KeyboardEvent) => {
     const next = nextPoint(event.key, points, selected);
     if (next === undefined) return;
     event.preventDefault();
-    onSelect(next);
+    onSelect(next, 'key');
   };
   return (
     <chakra.div css={styles.plot} ref={widthRef} style={{ minHeight: layout.height }}>
@@ -41,8 +44,8 @@ export function Plot({ spec, description, selected, onSelect }: PlotProps) {
         aria-label={description}
         tabIndex={0}
         onKeyDown={walk}
-        onPointerMove={(event) => event.pointerType === 'mouse' && choose(event)}
-        onPointerDown={choose}
+        onPointerMove={(event) => event.pointerType === 'mouse' && choose(event, 'hover')}
+        onPointerDown={(event) => choose(event, 'press')}
         width="100%"
         style={{ height: layout.height }}
       >

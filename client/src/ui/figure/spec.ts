@@ -9,6 +9,8 @@ export interface AxisSpec {
   readonly format: (value: number) => string;
   /** Quantity / unit, typeset. */
   readonly title: readonly TextRun[];
+  /** Of a list of names: no lines across. */
+  readonly bare?: boolean;
 }
 
 export type LineStyle = 'fit' | 'outside' | 'prediction' | 'estimate1' | 'estimate2' | 'estimate3' | 'zero';
@@ -51,6 +53,16 @@ export interface PointsMark {
   readonly bars: 'all' | 'visible';
 }
 
+/** How far one series reaches in temperature: coloured by temperature, or broken where it carries no weight. */
+export interface ExtentMark {
+  readonly kind: 'extent';
+  readonly y: number;
+  /** K */
+  readonly low: number;
+  readonly high: number;
+  readonly open: boolean;
+}
+
 /** Words inside the drawing. */
 export interface LabelMark {
   readonly kind: 'label';
@@ -66,7 +78,7 @@ export interface LabelMark {
   readonly wideOnly?: boolean;
 }
 
-export type Mark = LineMark | BandMark | PointsMark | LabelMark;
+export type Mark = LineMark | BandMark | PointsMark | ExtentMark | LabelMark;
 
 export interface PanelSpec {
   /** CSS px, axis title and tick labels included. */

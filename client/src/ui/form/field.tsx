@@ -11,6 +11,8 @@ interface FrameProps {
   readonly error?: string | undefined;
   readonly size?: 'normal' | 'small';
   readonly width?: string;
+  /** In a wide margin the label stands at the left of its control. */
+  readonly beside?: boolean;
 }
 
 interface FieldProps<V extends FieldValues, N extends FieldPath<V>, T extends FieldValues = V> extends FrameProps {
@@ -36,17 +38,30 @@ function useFieldParts({ hint, error, size = 'normal' }: FrameProps) {
 
 type Parts = ReturnType<typeof useFieldParts>;
 
+const BESIDE = {
+  display: { lg: 'grid' },
+  gridTemplateColumns: { lg: '88px minmax(0, 1fr)' },
+  columnGap: '8px',
+  alignItems: 'baseline',
+  '& > p': { gridColumn: { lg: 2 } },
+};
+
 function Frame({
   parts,
   label,
   hint,
   error,
   width,
+  beside = false,
   children,
 }: FrameProps & { readonly parts: Parts; readonly children: ReactNode }) {
   const { id, styles } = parts;
   return (
-    <chakra.div css={styles.root} maxWidth="100%" {...(width === undefined ? {} : { width })}>
+    <chakra.div
+      css={beside ? [styles.root, BESIDE] : styles.root}
+      maxWidth="100%"
+      {...(width === undefined ? {} : { width })}
+    >
       <chakra.label css={styles.label} htmlFor={id}>
         {label}
       </chakra.label>

@@ -108,8 +108,8 @@ export const ledgerRecipe = defineSlotRecipe({
     root: { '& td, & th': { paddingRight: '13px' } },
     switch: {
       display: 'inline-flex',
-      gap: '8px',
-      alignItems: 'baseline',
+      gap: '3px',
+      alignItems: 'center',
       background: 'none',
       cursor: 'pointer',
       borderBottom: '1.5px solid',

@@ -51,6 +51,8 @@ interface DataTableProps<R> {
   readonly secondLine?: (row: R) => ReactNode;
   /** Enter on a row. */
   readonly onOpen?: (row: R) => void;
+  /** Any other key on a row; true when it does something. */
+  readonly onKey?: (row: R, key: string) => boolean;
   readonly filterable?: boolean;
   readonly empty?: ReactNode;
   /** More words after “Copy, CSV”. */
@@ -88,7 +90,11 @@ export function DataTable<R extends object>(props: DataTableProps<R>) {
     enableSortingRemoval: true,
   });
   const shown = table.getRowModel().rows;
-  const keys = useRowKeys(shown.length, (index) => shown[index] && props.onOpen?.(shown[index].original));
+  const keys = useRowKeys(
+    shown.length,
+    (index) => shown[index] && props.onOpen?.(shown[index].original),
+    (index, key) => (shown[index] && props.onKey?.(shown[index].original, key)) ?? false,
+  );
   const plain = () => ({
     head: columns.map((column) => column.name),
     rows: shown.map(({ original }) => columns.map((column) => column.value(original))),

@@ -1,0 +1,4 @@
+import { PairsPage } from '../features/pairs/pairs-page';
+
+/** /pairs */
+export const Component = () => <PairsPage />;

@@ -1,0 +1,4 @@
+import { SeriesListPage } from '../features/series/series-list-page';
+
+/** /series */
+export const Component = () => <SeriesListPage />;
