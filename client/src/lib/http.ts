@@ -50,7 +50,8 @@ async function send(path: string, { method = 'GET', json, form, accessToken, sig
   }
 }
 
-async function problemOf(response: Response): Promise<HttpProblem> {
+/** The problem document of a refused request. */
+export async function problemOf(response: Response): Promise<HttpProblem> {
   const problem = record(await response.json().catch(() => null));
   const message = text(problem['detail']) ?? text(problem['title']) ?? `The service answered ${response.status}.`;
   const retryAfter = Number(response.headers.get('Retry-After') ?? NaN);

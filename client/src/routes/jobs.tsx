@@ -1,0 +1,2 @@
+/** /jobs */
+export { JobsPage as Component } from '../features/admin/jobs-page';

@@ -1,0 +1,2 @@
+/** /mail */
+export { MailPage as Component } from '../features/admin/mail-page';

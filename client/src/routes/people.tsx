@@ -1,0 +1,2 @@
+/** /people */
+export { PeoplePage as Component } from '../features/admin/people-page';
