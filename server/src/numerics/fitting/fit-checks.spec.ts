@@ -214,6 +214,38 @@ describe('a fit with an assigned deviation', () => {
   });
 });
 
+describe('a fit of exact data', () => {
+  const exact = [0, 1, 2].map((s) => ({
+    ...aSeries(wide),
+    points: wide.map((t) => {
+      const temperature = t + s;
+      const diffusivity = 2e-5 * (temperature / 298.15) ** 1.75;
+      return { ...aSeries([temperature]).points[0]!, diffusivity, diffusivityUncertainty: 0.01 * diffusivity };
+    }),
+  }));
+  const choices = [
+    { seriesEffect: 'POOLED' },
+    { seriesEffect: 'POOLED', loss: 'HUBER' },
+    { seriesEffect: 'POOLED', loss: 'BISQUARE' },
+    { seriesEffect: 'RANDOM_INTERCEPT' },
+    { seriesEffect: 'RANDOM_INTERCEPT_AND_SLOPE' },
+  ] as const;
+  const cases = choices.flatMap((choice) =>
+    (['STATED', 'EFFECTIVE_VARIANCE', 'EQUAL'] as const).flatMap((weighting) =>
+      (['LN_DIFFUSIVITY', 'DIFFUSIVITY'] as const).flatMap((objective) =>
+        [1, 3].map((count) => ({ ...choice, weighting, objective, count })),
+      ),
+    ),
+  );
+
+  it.each(cases)('finds the truth: %j', ({ count, ...choice }) => {
+    const [d0, n] = fitted(exact.slice(0, count), choice).parameters;
+
+    expect(d0!.value / 2e-5).toBeCloseTo(1, 10);
+    expect(n!.value).toBeCloseTo(1.75, 9);
+  });
+});
+
 describe('evaluateCorrelation', () => {
   const fit = fitted([aSeries(wide)]);
 

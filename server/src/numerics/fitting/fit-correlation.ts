@@ -38,7 +38,7 @@ function fitSound(series: readonly FitSeries[], recipe: FitRecipe, form: Correla
   if (isFinite(fit)) return { ok: true, fit };
   return {
     ok: false,
-    problems: [notDeterminable('The numbers are too far apart in size for any result to be finite')],
+    problems: [notDeterminable('No finite result: the points are too few for this recipe, or too far apart in size')],
   };
 }
 

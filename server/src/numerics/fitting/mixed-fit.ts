@@ -5,7 +5,7 @@ import { type Estimate } from './estimate.js';
 import { lnDeviations, relativeResiduals, relativeVariances, variancesFollowFit, type FitTask } from './fit-task.js';
 import { type BetweenSeries, type FitRecipe } from './fit.types.js';
 import { tangentFit } from './point-fit.js';
-import { fitPooled, LEAST_SCATTER } from './pooled-fit.js';
+import { fitPooled } from './pooled-fit.js';
 import { betweenCovariance, likelihoodAt, type SeriesProducts } from './restricted-likelihood.js';
 import { seriesProducts } from './series-products.js';
 import { fitComponents, type ComponentModel, type FittedComponents } from './variance-components.js';
@@ -14,10 +14,15 @@ import { fitComponents, type ComponentModel, type FittedComponents } from './var
 export const USUAL_DEVIATION = 0.03;
 /** From this many series on, the between-series deviation is estimated. */
 const ENOUGH_SERIES = 3;
-const SETTLED = 1e-13;
+/** Steps of ln D0 and the exponents below which rounds agree; the components are found to about as many digits. */
+const SETTLED = 1e-11;
 const ROUNDS = 200;
-/** Under equal weights the scale is free; this part of the scatter of all points keeps its logarithm finite. */
-const LEAST_SCALE = 1e-10;
+/**
+ * Under equal weights the scale is free, and exact data would drive it to zero. A relative scatter below the first, or
+ * below this part of the scatter of all points, is not told from none.
+ */
+const LEAST_SCATTER = 1e-6;
+const LEAST_PART = 1e-4;
 
 /**
  * ln D_ij = ln f + b_i + s_i (ln T_ij − centre) + e_ij with random b_i, s_i: variance components by REML, parameters
@@ -65,15 +70,16 @@ function fitTangent(task: FitTask, beta: Float64Array): TangentFit {
     variances: variances.map((variance) => (variance * foreseen) / unit ** 2),
     common: columns.common.map((common) => common / unit),
   });
-  const model = componentModel(task, unit);
+  const leastScale = isEqual ? Math.max(LEAST_PART ** 2, LEAST_SCATTER ** 2 / (meanVariance * foreseen)) : 1;
+  const model = componentModel(task, unit, leastScale);
   return { variances, foreseen, unit, spread, products, model, fitted: fitComponents(products, model, true, null) };
 }
 
-function componentModel({ recipe, columns }: FitTask, unit: number): ComponentModel {
+function componentModel({ recipe, columns }: FitTask, unit: number, leastScale: number): ComponentModel {
   const isAssigned = columns.seriesCount < ENOUGH_SERIES || recipe.betweenSeriesDeviation !== null;
   const estimated = recipe.seriesEffect === 'RANDOM_INTERCEPT' ? 'INTERCEPT' : 'INTERCEPT_AND_SLOPE';
   return {
-    leastScale: recipe.weighting === 'EQUAL' ? LEAST_SCALE : 1,
+    leastScale,
     estimated: isAssigned ? 'NONE' : estimated,
     assigned: { intercept: (assignedDeviation(recipe) / unit) ** 2, covariance: 0, slope: 0 },
   };

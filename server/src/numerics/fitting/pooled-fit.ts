@@ -8,10 +8,10 @@ import { fitPoints, reciprocals, tangentFit, type PointFit } from './point-fit.j
 import { influenceOf, medianScale, robustFactor } from './robust.js';
 
 /** Steps between rounds of weights, in units of 1 (ln D0 and exponents are of that order), below which they agree. */
-const SETTLED = 1e-13;
-const ROUNDS = 1000;
+const SETTLED = 1e-12;
+const ROUNDS = 300;
 /** Residuals of exact data are rounding; a relative scatter below this is not told from none. */
-export const LEAST_SCATTER = 1e-12;
+const LEAST_SCATTER = 1e-9;
 
 /** Where the rounds of weights have settled. */
 interface Settled {
@@ -113,7 +113,7 @@ function robustWeightsOf(
   variances: Float64Array,
 ): Float64Array {
   const whitened = whitenedBy(variances, residuals);
-  const scale = medianScale(whitened);
+  const scale = medianScale(whitened, leastScale(variances));
   const influence = influenceOf(loss);
   return whitened.map((residual) => influence.weight(residual / scale));
 }
@@ -128,8 +128,13 @@ function scaleOf(
   const observed =
     recipe.loss === 'LEAST_SQUARES'
       ? reducedChiSquare
-      : robustFactor(influenceOf(recipe.loss), whitened, medianScale(whitened), beta.length);
-  return Math.max(recipe.weighting === 'EQUAL' ? LEAST_SCATTER ** 2 / variances[0]! : 1, observed);
+      : robustFactor(influenceOf(recipe.loss), whitened, medianScale(whitened, leastScale(variances)), beta.length);
+  return Math.max(recipe.weighting === 'EQUAL' ? leastScale(variances) ** 2 : 1, observed);
+}
+
+/** `LEAST_SCATTER` in units of the points' standard uncertainties. */
+function leastScale(variances: Float64Array): number {
+  return LEAST_SCATTER / Math.sqrt(variances[0]!);
 }
 
 /**

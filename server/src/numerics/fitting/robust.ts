@@ -2,9 +2,6 @@ import { type Loss } from './fit.types.js';
 
 /** The consistency factor of the median absolute deviation: the upper quartile of the standard normal distribution. */
 const NORMAL_QUARTILE = 0.6744897501960817;
-/** Residuals of exact data are rounding; below this relative scale they are not told apart. */
-const LEAST_SCALE = 1e-12;
-
 /** ψ(t)/t and ψ′(t) of a loss. */
 interface Influence {
   weight(t: number): number;
@@ -29,12 +26,16 @@ export function influenceOf(loss: Exclude<Loss, 'LEAST_SQUARES'>): Influence {
   return loss === 'HUBER' ? HUBER : BISQUARE;
 }
 
-/** Median of the absolute values over the normal quartile: the scale of residuals about zero that outliers do not move. */
-export function medianScale(whitened: Float64Array): number {
+/**
+ * Median of the absolute values over the normal quartile: the scale of residuals about zero that outliers do not move.
+ *
+ * @param least below which the scale does not fall, because the residuals of exact data are rounding
+ */
+export function medianScale(whitened: Float64Array, least: number): number {
   const sizes = whitened.map(Math.abs).sort();
   const middle = sizes.length >> 1;
   const median = sizes.length % 2 === 1 ? sizes[middle]! : (sizes[middle - 1]! + sizes[middle]!) / 2;
-  return Math.max(median / NORMAL_QUARTILE, LEAST_SCALE);
+  return Math.max(median / NORMAL_QUARTILE, least);
 }
 
 /**

@@ -55,6 +55,8 @@ export function heterogeneity({ means, variances }: Offsets): { cochranQ: number
   }
   const mean = sum / precision;
   const cochranQ = means.reduce((total, value, s) => total + (value - mean) ** 2 / variances[s]!, 0);
+  // Exact data under equal weights have no variance to compare with.
+  if (!Number.isFinite(cochranQ)) return null;
   return { cochranQ, iSquared: cochranQ > freedom ? (cochranQ - freedom) / cochranQ : 0 };
 }
 

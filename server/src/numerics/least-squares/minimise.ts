@@ -48,6 +48,7 @@ function newtonStep(
     const beside = evaluate(shifted(point, k, width)).gradient;
     for (let i = 0; i < size; i++) hessian.set(i, k, (beside[i]! - gradient[i]!) / width);
   }
+  if (!hessian.to1DArray().every(Number.isFinite)) return downhill(gradient);
   const { realEigenvalues, eigenvectorMatrix } = new EigenvalueDecomposition(
     hessian.add(hessian.transpose()).mul(0.5),
     {
@@ -66,6 +67,12 @@ function newtonStep(
   });
   const longest = step.reduce((length, value) => Math.max(length, Math.abs(value)), 0);
   return longest > 2 ? step.map((value) => (2 * value) / longest) : step;
+}
+
+/** A short step down the gradient, for a point at the edge of where the function is defined; none where it is not. */
+function downhill(gradient: Float64Array): Float64Array {
+  const steepest = gradient.reduce((largest, value) => Math.max(largest, Math.abs(value)), 0);
+  return gradient.map((value) => (steepest > 0 && steepest < Infinity ? (-0.1 * value) / steepest : 0));
 }
 
 function descended(

@@ -28,6 +28,8 @@ export interface Polished {
 const CONVERGED_OFFSET = 1e-10;
 /** A relative step this short moves no digit that is asked for; it decides where the residuals are rounding noise. */
 const CONVERGED_STEP = 1e-11;
+/** So is a step that moves the model by this part of the response; it decides for parameters that are zero. */
+const CONVERGED_MOVE = 1e-14;
 const SMALL_OFFSET = 1e-3;
 const STEPS_WITHOUT_GAIN = 2;
 /** Steps this short, relative to the parameters, are rounding. */
@@ -155,7 +157,10 @@ function gaussNewton(problem: WhitenedProblem, start: Float64Array): Polished {
     const step = solveUpper(at.factors, at.rotated);
     const next = parameters.map((value, k) => value + step[k]! / at.norms[k]!);
     const stepLength = relativeLength(step, at.norms, parameters);
-    const isConverged = at.relativeOffset < CONVERGED_OFFSET || stepLength < CONVERGED_STEP;
+    const isConverged =
+      at.relativeOffset < CONVERGED_OFFSET ||
+      stepLength < CONVERGED_STEP ||
+      step.every((value) => Math.abs(value) <= CONVERGED_MOVE * problem.norm);
     if (!best || stepLength < best.stepLength) {
       best = { parameters, sumOfSquares, relativeOffset: at.relativeOffset, stepLength, isConverged };
       sinceBest = -1;

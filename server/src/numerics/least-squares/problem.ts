@@ -32,6 +32,8 @@ export class WhitenedProblem {
   readonly observed: Float64Array;
   readonly count: number;
   readonly parameterCount: number;
+  /** Length of `observed` */
+  readonly norm: number;
   private readonly reciprocals: Float64Array | null;
 
   constructor(private readonly problem: LeastSquaresProblem) {
@@ -39,6 +41,7 @@ export class WhitenedProblem {
     this.parameterCount = problem.parameterCount;
     this.reciprocals = problem.deviations?.map((deviation) => 1 / deviation) ?? null;
     this.observed = problem.observed.map((value, i) => value * (this.reciprocals?.[i] ?? 1));
+    this.norm = Math.sqrt(this.observed.reduce((sum, value) => sum + value * value, 0));
   }
 
   /** Writes observed − model, whitened, into `into` and returns the sum of squares; NaN or Infinity where undefined. */

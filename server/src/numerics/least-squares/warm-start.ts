@@ -19,7 +19,7 @@ export interface WarmStartOptions {
 export function warmStart(projected: ProjectedProblem, start: number[], options: WarmStartOptions): number[] {
   const first = projected.at(start);
   if (!first || start.length === 0) return start;
-  const norm = Math.sqrt(projected.problem.observed.reduce((sum, value) => sum + value * value, 0)) || 1;
+  const norm = projected.problem.norm || 1;
   const scales = columnNorms(first.jacobian, first.residuals.length, start.length).map((length) => length / norm);
   if (!scales.every((scale) => scale > 0)) return start;
 
