@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { type Outcome, problem, type Problem, refused, accepted } from '../common/problem.js';
 import { type Viewer } from '../common/viewer.js';
+import { type StoredUpload } from '../files/file.entity.js';
 import { FilesService } from '../files/files.service.js';
 import { estimatesOf } from '../fits/pair-estimates.js';
 import { usualRelativeUncertainty } from '../series/measurement-methods.js';
@@ -82,8 +83,10 @@ export class BringInService {
     const understood = await this.understandForKeeping(table, request);
     if (!understood.isComplete) return refused(...problemsOf(understood));
     await running.enter('STORING');
-    const fileId = request.fileId ?? (await this.keepText(request.text ?? '', viewer));
+    const pasted = request.text === undefined ? null : await this.keepText(request.text, viewer);
+    const fileId = request.fileId ?? pasted?.id ?? null;
     const created = await this.series.create(seriesInput(request, understood), viewer, fileId);
+    if (!created.ok && pasted) await this.files.takeBack(pasted);
     return created.ok ? accepted({ seriesId: created.value.id, pointCount: understood.points.length }) : created;
   }
 
@@ -92,9 +95,8 @@ export class BringInService {
     return understand(table, mapping, request.decisions, await this.expectation(request));
   }
 
-  private async keepText(text: string, viewer: Viewer): Promise<string> {
-    const file = await this.files.keep('pasted table.txt', Buffer.from(text), viewer);
-    return file.id;
+  private keepText(text: string, viewer: Viewer): Promise<StoredUpload> {
+    return this.files.keep('pasted table.txt', Buffer.from(text), viewer);
   }
 
   private async expectation({ a, b, method }: Pick<ReadRequest, 'a' | 'b' | 'method'>): Promise<Expectation> {

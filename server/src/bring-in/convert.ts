@@ -127,7 +127,8 @@ class CellReader {
 
   /** What a workbook says about the cell; null when it is to be read like any other. */
   private readMarks(row: TableRow, at: { row: number; column: number }): number | null {
-    const marks = row.marks?.filter(({ column }) => column === this.column) ?? [];
+    const marks = row.marks?.filter(({ column }) => column === this.column);
+    if (marks === undefined || marks.length === 0) return null;
     const shown = cellText(row.cells[this.column]);
     for (const { kind, detail } of marks) {
       if (kind === 'ERROR')

@@ -15,6 +15,9 @@ const TIMES_TEN = /^(.*?)[×x*·]10\^?([+-]?\d{1,3})$/i;
 /** digits in threes, as ISO 80000-1 groups them with a space */
 const SPACED = /^([+-]?\d{1,3})((?: \d{3})+)(?=$|[.,])/;
 
+/** What nearly every cell of a long table looks like. */
+const WITHOUT_DOUBT = { '.': /^-?\d{1,15}(?:\.\d{1,15})?$/, ',': /^-?\d{1,15}(?:,\d{1,15})?$/ };
+
 /**
  * Reads a number the way it is written in tables: decimal point or comma, minus sign or hyphen, powers of ten as `e-5` or
  * `×10^-5`, thousands set off by spaces or by the sign that is not the decimal one.
@@ -24,6 +27,7 @@ const SPACED = /^([+-]?\d{1,3})((?: \d{3})+)(?=$|[.,])/;
 export function parseCellNumber(cell: Cell, decimal: DecimalSign, decimalCertain: boolean): CellNumber | null {
   if (typeof cell === 'number') return Number.isFinite(cell) ? { text: String(cell), alternative: null } : null;
   if (cell === null) return null;
+  if (decimalCertain && WITHOUT_DOUBT[decimal].test(cell)) return { text: cell.replace(',', '.'), alternative: null };
   const text = cell
     .replace(/[\u00a0\u2009\u202f]/g, ' ')
     .trim()
@@ -64,4 +68,6 @@ const NOTHING = new Set(['', '-', '–', '—', 'n/a', 'na', 'n.a.', 'nan', 'non
 
 /** Whether a cell says that there is no value. */
 export const saysNothing = (cell: Cell | undefined): boolean =>
-  cell === null || cell === undefined || (typeof cell === 'string' && NOTHING.has(cell.trim().toLowerCase()));
+  cell === null ||
+  cell === undefined ||
+  (typeof cell === 'string' && !/^\d/.test(cell) && NOTHING.has(cell.trim().toLowerCase()));

@@ -64,6 +64,12 @@ export class FilesService {
     return buffer(await this.open(file));
   }
 
+  /** Takes back a file that was kept for something that was then refused. */
+  async takeBack(file: StoredUpload): Promise<void> {
+    await this.dataSource.getRepository(StoredUpload).delete(file.id);
+    await this.storage.remove(file.storageKey);
+  }
+
   private async maySee(file: StoredUpload, viewer: Viewer): Promise<boolean> {
     if (file.uploadedById === viewer.id || hasRole(viewer, 'EDITOR', 'ADMINISTRATOR')) return true;
     if (!isOfTheGroup(viewer)) return false;

@@ -3,6 +3,7 @@ import path from 'node:path';
 import { type Readable } from 'node:stream';
 import {
   CreateBucketCommand,
+  DeleteObjectCommand,
   GetObjectCommand,
   HeadBucketCommand,
   HeadObjectCommand,
@@ -73,6 +74,11 @@ export class StorageService implements OnModuleInit, OnApplicationShutdown {
 
   async exists(key: string): Promise<boolean> {
     return (await this.head(key)) !== null;
+  }
+
+  /** Takes a file away; one that is not there is no error. */
+  async remove(key: string): Promise<void> {
+    await this.client.send(new DeleteObjectCommand(this.at(key)));
   }
 
   /** @throws when the store does not answer; for the readiness check */

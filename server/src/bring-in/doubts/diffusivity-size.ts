@@ -15,7 +15,7 @@ const EXPLAINED_WITHIN = Math.log(1.35);
 const RANGE_OF_NORMAL = 1.349;
 
 /** ln(D/D(estimate)) of each row, NaN where it cannot be had. */
-export function logRatios(judged: Judged, { estimate }: Expectation): Float64Array {
+function logRatios(judged: Judged, { estimate }: Expectation): Float64Array {
   const ratios = new Float64Array(judged.rows.length).fill(Number.NaN);
   for (const i of judged.complete) ratios[i] = logRatio(judged, i, estimate ?? anyPair);
   return ratios;
@@ -41,7 +41,7 @@ export function diffusivitySizeDoubts(judged: Judged, expectation: Expectation):
   const shifted = judged.complete.flatMap((i) =>
     shiftDoubt(judged, { i, column, unit, off: (ratios[i] ?? 0) - centre }),
   );
-  return [...shifted, ...farFromEstimate(judged, column, expectation)];
+  return [...shifted, ...farFromEstimate(judged, ratios, expectation)];
 }
 
 interface OffCell {
@@ -109,8 +109,9 @@ function shiftedSign(typed: string, { unit, off }: OffCell): OtherReading | null
   return { code: 'DECIMAL_SHIFT', value, label: short(fromSi(value, unit)), question: 'a shifted decimal sign?' };
 }
 
-function farFromEstimate(judged: Judged, column: number, expectation: Expectation): Issue[] {
-  const ratios = logRatios(judged, expectation).map((ratio, i) => (judged.reread[i] ? Number.NaN : ratio));
+function farFromEstimate(judged: Judged, all: Float64Array, expectation: Expectation): Issue[] {
+  const column = judged.columnOf('DIFFUSIVITY');
+  const ratios = all.map((ratio, i) => (judged.reread[i] ? Number.NaN : ratio));
   const middle = quartiles(ratios);
   if (middle === null || ratios.filter(Number.isFinite).length < FEWEST_FOR_QUARTILES) return [];
   const relative = quartiles(

@@ -7,7 +7,7 @@ export function duplicateDoubts(judged: Judged): Issue[] {
   const compared = judged.mapping.columns.flatMap(({ role }, column) => (role === 'ROW_NUMBER' ? [] : [column]));
   const seen = new Map<string, number>();
   return judged.rows.flatMap((row) => {
-    const key = JSON.stringify(compared.map((column) => cellText(row.cells[column])));
+    const key = compared.map((column) => cellText(row.cells[column])).join('\0');
     const first = seen.get(key);
     if (first === undefined) {
       seen.set(key, row.number);
