@@ -34,5 +34,10 @@ export default defineConfig({
     include: ['src/**/*.spec.{ts,tsx}'],
     setupFiles: [file('src/test-setup.ts')],
     restoreMocks: true,
+    testTimeout: 20_000,
+    // One document for all files of a worker: making one costs more than most of the tests.
+    pool: 'threads',
+    isolate: false,
+    maxWorkers: 2,
   },
 });

@@ -80,7 +80,7 @@ export const substanceStrings = {
       'Somebody else has changed this substance meanwhile. What you typed is kept; load the page again to see their change.',
     problems: {
       name: 'Enter a name.',
-      formula: 'Enter the formula: element symbols and numbers.',
+      formula: 'Enter the formula: letters, numbers and brackets.',
       cas: 'The check digit does not fit: look the number up again.',
       number: 'Enter a number.',
       positive: 'Must be above zero.',

@@ -138,7 +138,8 @@ interface SheetSectionProps extends Omit<SheetLeafProps, 'current'> {
   readonly file: string;
 }
 
-function SheetSection({ section: { id, number, title }, version, code, pairId, file }: SheetSectionProps) {
+/** One section of a sheet, by its id; pages that edit and review a version show them, too. */
+export function SheetSection({ section: { id, number, title }, version, code, pairId, file }: SheetSectionProps) {
   const { content } = version;
   const shared = { number, title, content, file };
   switch (id) {

@@ -47,7 +47,7 @@ export const substanceSchema = z.object({
   formula: z
     .string()
     .trim()
-    .regex(/^([A-Z][a-z]?\d*)+$|^[A-Z][A-Za-z]*$/, problems.formula),
+    .regex(/^[A-Za-z0-9()]+$/, problems.formula),
   casNumber: z
     .string()
     .trim()
@@ -97,7 +97,7 @@ export const toFormValues = (substance: SubstanceFieldsFragment): SubstanceFormV
       ? []
       : [
           {
-            kind: constant.kind as SubstanceConstantKind,
+            kind: constant.kind,
             value: typed(constant.value),
             temperatureMinimum: typed(constant.temperatureMinimum),
             temperatureMaximum: typed(constant.temperatureMaximum),
@@ -151,7 +151,7 @@ const equationInput = ({
   source,
   note,
 }: Kept[number]) => ({
-  kind: kind as SubstanceConstantKind,
+  kind: kind,
   form: form ?? null,
   coefficients: coefficients.map(({ symbol, value }) => ({ symbol, value })),
   unit,
