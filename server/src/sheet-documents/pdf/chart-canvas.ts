@@ -2,14 +2,13 @@ import { CustomChart, LineChart } from 'echarts/charts';
 import { GridComponent } from 'echarts/components';
 import * as echarts from 'echarts/core';
 import { SVGRenderer } from 'echarts/renderers';
-import { openSync } from 'fontkit';
-import { workSansFile } from './print-fonts.js';
+import { WORK_SANS, openFont } from './print-fonts.js';
 
 echarts.use([LineChart, CustomChart, GridComponent, SVGRenderer]);
 
 /** Node has no canvas to measure text on; without widths, labels would be placed by a guess. */
 function measureWithFontkit(): void {
-  const [regular, semibold] = [openSync(workSansFile(400)), openSync(workSansFile(600))];
+  const [regular, semibold] = [openFont(WORK_SANS, 400), openFont(WORK_SANS, 600)];
   echarts.setPlatformAPI({
     measureText: (text, css = '12px') => {
       const font = /\b(bold|[6-9]00)\b/.test(css) ? semibold : regular;

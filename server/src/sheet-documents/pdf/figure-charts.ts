@@ -15,6 +15,7 @@ import {
   type ChartPoint,
   type XY,
 } from './chart-layers.js';
+import { WORK_SANS } from './print-fonts.js';
 import { printPalette } from './print-palette.js';
 
 /** Width of the column at 96 px to the inch. */
@@ -124,7 +125,7 @@ function draw(figures: SheetFigures, height: number, plot: Plot): string {
   const label = { color: printPalette.ink2, fontSize: 10.5, hideOverlap: false };
   const option: EChartsCoreOption = {
     animation: false,
-    textStyle: { fontFamily: 'Work Sans' },
+    textStyle: { fontFamily: WORK_SANS },
     grid: { ...CHART_MARGINS, containLabel: false },
     xAxis: {
       type: 'value',

@@ -2,8 +2,8 @@
 declare module 'fontkit' {
   export interface FontkitFont {
     readonly unitsPerEm: number;
-    layout(text: string, features?: readonly string[]): { readonly advanceWidth: number };
+    layout(text: string): { readonly advanceWidth: number };
     hasGlyphForCodePoint(codePoint: number): boolean;
   }
-  export function openSync(path: string): FontkitFont;
+  export function create(font: Uint8Array): FontkitFont;
 }

@@ -1,5 +1,4 @@
 import { StyleSheet } from '@react-pdf/renderer';
-import { PRINT_FAMILIES } from './print-fonts.js';
 import { printPalette } from './print-palette.js';
 
 export const POINTS_PER_MM = 72 / 25.4;
@@ -26,7 +25,7 @@ const MARGIN_WIDTH = millimetres(40);
 export const styles = StyleSheet.create({
   // No line height here and in the footer: fixed text with one is lost by the renderer. Elsewhere it stands beside its font
   // size, of which it is a multiple; alone it would be a multiple of the renderer's 18 pt.
-  page: { fontFamily: PRINT_FAMILIES, fontSize: 9.4, color: printPalette.ink },
+  page: { fontSize: 9.4, color: printPalette.ink },
   masthead: {
     flexDirection: 'row',
     justifyContent: 'space-between',

@@ -1,6 +1,6 @@
 import { renderToBuffer } from '@react-pdf/renderer';
 import type { SheetContent } from '../sheet-content.types.js';
-import { registerPrintFonts } from './print-fonts.js';
+import { registerFonts } from './print-fonts.js';
 import type { Paper } from './print-layout.js';
 import { printable } from './printable.js';
 import { SheetDocument } from './sheet-document.js';
@@ -13,6 +13,7 @@ export type { Paper } from './print-layout.js';
  * @throws when a chart draws with something the document cannot show
  */
 export async function renderSheetPdf(content: SheetContent, paper: Paper = 'A4'): Promise<Buffer> {
-  registerPrintFonts();
-  return renderToBuffer(<SheetDocument content={printable(content)} paper={paper} />);
+  const { value, families } = printable(content);
+  registerFonts(families);
+  return renderToBuffer(<SheetDocument content={value} paper={paper} families={families} />);
 }

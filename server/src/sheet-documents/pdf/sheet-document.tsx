@@ -21,11 +21,14 @@ import { Runs } from './typeset-text.js';
 interface SheetDocumentProps {
   readonly content: SheetContent;
   readonly paper: Paper;
+  /** In which glyphs are looked for, in this order */
+  readonly families: string[];
 }
 
 /** The data sheet as a document worth printing, from its content alone. */
-export function SheetDocument({ content, paper }: SheetDocumentProps) {
+export function SheetDocument({ content, paper, families }: SheetDocumentProps) {
   const { size, left, right, top, bottom } = PAPERS[paper];
+  const page = { fontFamily: families, paddingLeft: left, paddingRight: right, paddingTop: top, paddingBottom: bottom };
   const issuedAt = content.versions.find(({ isThis }) => isThis)?.date ?? null;
   return (
     <Document
@@ -38,10 +41,7 @@ export function SheetDocument({ content, paper }: SheetDocumentProps) {
       // The day of issue, not of printing: the same sheet is the same file.
       {...(issuedAt === null ? {} : { creationDate: new Date(issuedAt), modificationDate: new Date(issuedAt) })}
     >
-      <Page
-        size={size}
-        style={[styles.page, { paddingLeft: left, paddingRight: right, paddingTop: top, paddingBottom: bottom }]}
-      >
+      <Page size={size} style={[styles.page, page]}>
         <Watermark word={content.standing.watermark} />
         <Footer content={content} left={left} right={right} />
         <Masthead content={content} />

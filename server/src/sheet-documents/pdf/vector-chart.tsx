@@ -1,6 +1,6 @@
 import { Circle, ClipPath, Defs, G, Line, Path, Polygon, Polyline, Rect, Svg, Text } from '@react-pdf/renderer';
 import { createElement, type ComponentType, type ReactElement, type ReactNode } from 'react';
-import { PRINT_FAMILIES } from './print-fonts.js';
+import { WORK_SANS } from './print-fonts.js';
 import { parseSvg, type SvgNode } from './svg-tree.js';
 
 type Attributes = Record<string, unknown>;
@@ -104,7 +104,7 @@ function textAttributes(node: SvgNode): Attributes {
     y: Number.parseFloat(attributes.y ?? '0') + shift,
     style: {
       fontSize: size,
-      fontFamily: PRINT_FAMILIES,
+      fontFamily: WORK_SANS,
       fontWeight: weight >= 600 ? 600 : 400,
       fontFeatureSettings: ['tnum'],
     },
