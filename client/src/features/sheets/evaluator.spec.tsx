@@ -2,8 +2,7 @@ import { ApolloLink } from '@apollo/client';
 import { ApolloProvider } from '@apollo/client/react';
 import { render, screen, waitFor } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
-import { GraphQLError } from 'graphql';
-import { of } from 'rxjs';
+import { of, type Observable } from 'rxjs';
 import { afterEach, describe, expect, it } from 'vitest';
 import { createApolloClient } from '../../lib/apollo';
 import { defaultUnits, readerUnits } from '../../lib/units';
@@ -21,14 +20,12 @@ const RANGE = { temperatureMinimum: 283.15, temperatureMaximum: 448.15, pressure
 /** Answers every evaluation with the same invented value, marked outside beyond the range in T, and notes what was asked. */
 function show(answer: 'value' | 'refusal' = 'value') {
   const asked: Asked[] = [];
-  const link = new ApolloLink((operation) => {
+  const link = new ApolloLink((operation): Observable<ApolloLink.Result> => {
     const variables = operation.variables as Asked;
     asked.push(variables);
     if (answer === 'refusal')
       return of({
-        errors: [
-          new GraphQLError('The temperature is below absolute zero.', { extensions: { code: 'BAD_USER_INPUT' } }),
-        ],
+        errors: [{ message: 'The temperature is below absolute zero.', extensions: { code: 'BAD_USER_INPUT' } }],
       });
     const [temperature = 0] = variables.temperature;
     const outside = temperature < RANGE.temperatureMinimum || temperature > RANGE.temperatureMaximum ? [0] : [];

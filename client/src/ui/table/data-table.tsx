@@ -16,27 +16,12 @@ import {
 import { Fragment, useMemo, useState, type ReactNode } from 'react';
 import { uiStrings } from '../../strings/ui';
 import { tableRecipe } from '../recipes/table.recipe';
+import { cellClass, type DataColumn } from './column';
 import { TableHead } from './table-head';
 import { TableTools } from './table-tools';
 import { useRowKeys } from './use-row-keys';
 
-/** One column: how it is headed, what it is sorted, filtered and copied by, and how a cell is set. */
-export interface DataColumn<R> {
-  readonly id: string;
-  readonly head: ReactNode;
-  /** On a line of its own under the head. */
-  readonly unit?: ReactNode;
-  /** Head and unit as plain text, for copies and CSV. */
-  readonly name: string;
-  readonly value: (row: R) => string | number | null;
-  /** The cell as set; its value when absent. */
-  readonly cell?: (row: R) => ReactNode;
-  readonly numeric?: boolean;
-  readonly sortable?: boolean;
-  /** Left away on a narrow screen until all columns are asked for. */
-  readonly wideOnly?: boolean;
-  readonly className?: string;
-}
+export { type DataColumn } from './column';
 
 interface DataTableProps<R> {
   /** What the table holds, for those who hear it. */
@@ -180,10 +165,3 @@ const SecondLine = ({ span, children }: { readonly span: number; readonly childr
 const rowClass = (emphasised: boolean, index: number, hairlines: boolean) =>
   [emphasised ? 'emphasis' : '', hairlines && index > 0 && index % 5 === 0 ? 'fifth' : ''].filter(Boolean).join(' ') ||
   undefined;
-
-export function cellClass<R>(column: DataColumn<R>): string | undefined {
-  return (
-    [column.numeric ? 'n' : '', column.wideOnly ? 'wide-only' : '', column.className ?? ''].filter(Boolean).join(' ') ||
-    undefined
-  );
-}

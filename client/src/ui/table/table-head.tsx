@@ -1,6 +1,6 @@
 import { chakra, type SystemStyleObject } from '@chakra-ui/react';
 import { type SortingState } from '@tanstack/react-table';
-import { cellClass, type DataColumn } from './data-table';
+import { cellClass, type DataColumn } from './column';
 
 interface TableHeadProps<R> {
   readonly columns: readonly DataColumn<R>[];
