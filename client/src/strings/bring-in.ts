@@ -3,7 +3,7 @@ export const bringInStrings = {
   title: 'Bring in a series',
   path: { series: 'Series', page: 'Bring in' },
   steps: { label: 'Steps', table: 'Table', understand: 'Understand', describe: 'Describe', keep: 'Keep whole' },
-  state: { nothing: 'Nothing kept yet', typed: 'what you typed stays here' },
+  state: { nothing: 'Nothing kept yet', typed: 'kept for you' },
   startOver: 'Start over',
   pairFailed: 'The pair could not be loaded.',
 
@@ -35,7 +35,7 @@ export const bringInStrings = {
     hint: 'Name, formula, synonym or CAS RN',
     order: 'The order does not matter: at low density *D*_{AB} = *D*_{BA}.',
     method: 'Method',
-    methodHint: 'As the trade says: evaporation tube, two-bulb cell, Loschmidt tube, …',
+    methodHint: 'evaporation tube, two-bulb cell, Loschmidt tube, …',
     readFrom: 'Read from',
     usual: 'Where the table states no *u*(*D*), the method gives {percent} % of *D*: {source}.',
     found: [
@@ -199,7 +199,8 @@ export const bringInStrings = {
   },
 
   figure: {
-    caption: 'The rows as understood, against the estimate ({label}) at each *T* and *P*. Bars: ±*u*.',
+    caption:
+      'The rows as understood, those not decided apart, against the estimate ({label}) at each *T* and *P*. Bars: ±*u*.',
     description:
       'Deviation of {points} understood points from the estimate by {label}, in percent, against temperature.',
     deviation: '100 (*D*/*D*(estimate) − 1)',

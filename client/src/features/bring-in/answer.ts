@@ -138,3 +138,9 @@ export function numbered(issues: readonly Issue[]): { issue: Issue; number: numb
   return ordered.map((issue, i) => ({ issue, number: i + 1 }));
 }
 export type NumberedIssue = ReturnType<typeof numbered>[number];
+
+/** An issue with what was chosen a moment ago, before the service has answered; a choice it does not offer decides nothing. */
+export function asDecided(issue: Issue, decisions: Readonly<Record<string, ChoiceId>>): Issue {
+  const chosen = decisions[issue.id] ?? decisions[issue.code];
+  return { ...issue, decided: issue.choices.find(({ id }) => id === chosen)?.id ?? null };
+}

@@ -26,8 +26,10 @@ interface Compared {
 /** The understood points against the estimate of kinetic theory. */
 export function DeviationFigure({ answer }: { readonly answer: ReadAnswer }) {
   const units = useReaderUnits();
-  const compared = answer.rows.flatMap(({ number, point, estimate }): Compared[] =>
-    point && estimate !== null ? [{ row: number, point, percent: percentAgainst(point, estimate) }] : [],
+  const compared = answer.rows.flatMap(({ number, point, estimate, state }): Compared[] =>
+    point && estimate !== null && state === 'KEPT'
+      ? [{ row: number, point, percent: percentAgainst(point, estimate) }]
+      : [],
   );
   if (compared.length === 0 || answer.estimateLabel === null) return null;
   return (

@@ -23,6 +23,8 @@ export function HeadSelect<T extends string>({ label, value, choices, onChange, 
         fontWeight={strong ? 600 : 400}
         color={strong ? 'ink' : 'ink2'}
         paddingLeft="0"
+        // As wide as what is chosen, not as the longest choice, where the browser can.
+        fieldSizing="content"
         onChange={(event) => {
           const chosen = choices.find(([one]) => one === event.target.value);
           if (chosen) onChange(chosen[0]);

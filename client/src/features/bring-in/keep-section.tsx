@@ -130,7 +130,7 @@ function entriesOf(draft: Draft, answer: ReadAnswer | null): Entry[] {
             <QuantityRange key="P" kind="pressure" low={pressure.minimum} high={pressure.maximum} />,
           ] as const,
         ]),
-    [words.uncertainty, <UncertaintyWords key="u" answer={answer} />],
+    ...(pointCount === 0 ? [] : [[words.uncertainty, <UncertaintyWords key="u" answer={answer} />] as const]),
     [words.beside, besideWords(draft)],
   ];
 }

@@ -6,7 +6,7 @@ import { Empty, Failed, Loading, Progress } from '../../ui/feedback/states';
 import { WordButton } from '../../ui/form/button';
 import { Section } from '../../ui/page/section';
 import { pastedGridRecipe } from '../../ui/recipes/table.recipe';
-import { numbered, type ReadAnswer } from './answer';
+import { asDecided, numbered, type ReadAnswer } from './answer';
 import { Constants } from './constants';
 import { DeviationFigure } from './deviation-figure';
 import { DoubtsList } from './doubts-list';
@@ -25,7 +25,7 @@ interface UnderstoodSectionProps {
 /** What the service understood of the table, its doubts in the margin. */
 export function UnderstoodSection({ draft, onDraft, reading }: UnderstoodSectionProps) {
   const { answer, error, isReading } = reading;
-  const issues = answer === null ? [] : numbered(answer.issues);
+  const issues = answer === null ? [] : numbered(answer.issues.map((issue) => asDecided(issue, draft.decisions)));
   return (
     <Section
       number={3}

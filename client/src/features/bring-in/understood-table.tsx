@@ -1,14 +1,14 @@
 import { chakra, useSlotRecipe } from '@chakra-ui/react';
-import { type ReactNode, useMemo } from 'react';
+import { useMemo } from 'react';
 import { fill } from '../../lib/fill';
 import { formatSigned } from '../../lib/format-quantity';
 import { type ReaderUnits, unitLabel, useReaderUnits } from '../../lib/units';
 import { bringInStrings } from '../../strings/bring-in';
-import { Aligned, mostPlaces } from '../../ui/numbers/aligned';
+import { Aligned } from '../../ui/numbers/aligned';
 import { Unit } from '../../ui/numbers/num';
 import { pastedGridRecipe, tableRecipe } from '../../ui/recipes/table.recipe';
 import { type ColumnMapping, type NumberedIssue, type ReadAnswer, type ShownRow } from './answer';
-import { estimateText, percentAgainst, SHOWN } from './cells';
+import { cellText, estimateText, percentAgainst, placesIn, SHOWN } from './cells';
 import { ColumnHead } from './column-head';
 
 const words = bringInStrings.understood;
@@ -26,7 +26,10 @@ export function UnderstoodTable({ answer, issues, onColumn }: UnderstoodTablePro
   const units = useReaderUnits();
   const { mapping, columns, rows, estimateLabel } = answer;
   const at = useMemo(() => placesOf(issues), [issues]);
-  const places = useMemo(() => mapping.columns.map((column) => placesIn(column, rows, units)), [mapping, rows, units]);
+  const places = useMemo(() => {
+    const points = rows.flatMap(({ point }) => point ?? []);
+    return mapping.columns.map(({ role }) => (SHOWN[role] ? placesIn(SHOWN[role], points, units) : 0));
+  }, [mapping, rows, units]);
   const compares = estimateLabel !== null;
   return (
     <chakra.div css={table.scroll} tabIndex={0} role="region" aria-label={words.label} marginTop="16px">
@@ -171,21 +174,11 @@ function Cell({ row, column, index, places, issue, units }: CellProps) {
         {brought}
       </chakra.td>
       <chakra.td css={[styles.understood, tint]} {...(isOpen ? { 'data-open': '' } : {})} {...described}>
-        {isOpen ? '?' : understood(row, shown.text, units, places)}
+        {isOpen ? '?' : row.point && <Aligned places={places}>{cellText(shown, row.point, units, places)}</Aligned>}
         <Marks numbers={issue === undefined ? [] : [issue.number]} />
       </chakra.td>
     </>
   );
-}
-
-function understood(
-  row: ShownRow,
-  textOf: NonNullable<(typeof SHOWN)['TEMPERATURE']>['text'],
-  units: ReaderUnits,
-  places: number,
-): ReactNode {
-  const text = row.point && textOf(row.point, units);
-  return text ? <Aligned places={places}>{text}</Aligned> : '';
 }
 
 function Marks({ numbers }: { readonly numbers: readonly number[] }) {
@@ -232,12 +225,6 @@ function twinOf(
 
 const spanOf = (column: ColumnMapping | undefined): number => (column !== undefined && SHOWN[column.role] ? 2 : 1);
 
-function placesIn({ role }: ColumnMapping, rows: readonly ShownRow[], units: ReaderUnits): number {
-  const shown = SHOWN[role];
-  if (shown === undefined) return 0;
-  return mostPlaces(rows.map(({ point }) => (point && shown.text(point, units)) ?? ''));
-}
-
 const bracket = {
   content: '""',
   position: 'absolute',
@@ -260,6 +247,8 @@ const GRID = {
   '& thead th': { verticalAlign: 'top', paddingLeft: '12px', position: 'relative' },
   '& td:not(:first-of-type):not(.n)': { paddingLeft: '12px' },
   '& .row': { color: 'ink2', fontSize: '13px', position: 'relative', paddingRight: '18px' },
+  // The number of a row stands before it, its bracket behind.
+  '& .row > span': { right: 'auto', left: 0 },
   '& .compared': { borderLeft: '1px solid', borderColor: 'rule', paddingLeft: '16px' },
   '& tbody .compared, & tbody .compared + td': { color: 'ink2' },
   '& tr[data-state=LEFT_OUT] td:not(.row)': { color: 'ink3', textDecoration: 'line-through' },
