@@ -84,6 +84,19 @@ describe('the limits of the GraphQL API', () => {
     expect(codeOf(await ask({ query: twoNames }))).toBe('GRAPHQL_VALIDATION_FAILED');
   });
 
+  it.each([
+    ['missing', {}],
+    ['null', { id: null }],
+    ['of another type', { id: { a: 1 } }],
+  ])('calls a variable that is %s the caller’s mistake', async (_, variables) => {
+    const query = 'mutation ($id: ID!) { submitSeries(id: $id) { problems { code } } }';
+    const response = await ask({ query, variables });
+    expect(response.status).toBe(400);
+    expect(response.body.errors).toEqual([
+      { message: expect.stringContaining('$id'), locations: expect.anything(), extensions: { code: 'BAD_USER_INPUT' } },
+    ]);
+  });
+
   it('says nothing of an unexpected error', async () => {
     const dataSource = testApp.app.get(DataSource);
     await dataSource.query('ALTER TABLE substances RENAME TO substances_elsewhere');

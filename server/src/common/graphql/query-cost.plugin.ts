@@ -1,5 +1,5 @@
 import { type ApolloServerPlugin, type GraphQLRequestContextDidResolveOperation } from '@apollo/server';
-import { type DocumentNode, GraphQLError, type GraphQLSchema, type OperationDefinitionNode } from 'graphql';
+import { type DocumentNode, GraphQLError, type GraphQLSchema, Kind, type OperationDefinitionNode } from 'graphql';
 import { type ComplexityEstimatorArgs, getComplexity, simpleEstimator } from 'graphql-query-complexity';
 import { LARGEST_PAGE } from './connection.js';
 
@@ -21,8 +21,8 @@ const hasPageVariable = (operation: OperationDefinitionNode | undefined) =>
   operation?.variableDefinitions?.some(({ type }) => /^Int!?$/.test(printType(type))) ?? false;
 
 function printType(type: NonNullable<OperationDefinitionNode['variableDefinitions']>[number]['type']): string {
-  if (type.kind === 'NamedType') return type.name.value;
-  return type.kind === 'NonNullType' ? `${printType(type.type)}!` : `[${printType(type.type)}]`;
+  if (type.kind === Kind.NAMED_TYPE) return type.name.value;
+  return type.kind === Kind.NON_NULL_TYPE ? `${printType(type.type)}!` : `[${printType(type.type)}]`;
 }
 
 /** Refuses operations that ask for too much, before they run. */
@@ -66,11 +66,18 @@ function complexity(
   operationName: string | null,
   variables: Record<string, unknown>,
 ): number {
-  return getComplexity({
-    schema,
-    query,
-    variables,
-    estimators: ESTIMATORS,
-    ...(operationName !== null && { operationName }),
-  });
+  try {
+    return getComplexity({
+      schema,
+      query,
+      variables,
+      estimators: ESTIMATORS,
+      ...(operationName !== null && { operationName }),
+    });
+  } catch (error) {
+    if (!(error instanceof GraphQLError)) throw error;
+    // Missing or malformed variables, which the count meets before the execution would.
+    const extensions = { code: 'BAD_USER_INPUT', http: { status: 400 } };
+    throw new GraphQLError(error.message, { nodes: error.nodes ?? null, extensions });
+  }
 }
