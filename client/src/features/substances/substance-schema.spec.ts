@@ -53,7 +53,7 @@ describe('the form of a substance', () => {
   it('keeps equations as they were', () => {
     const equation = {
       __typename: 'SubstanceConstant' as const,
-      kind: 'VAPOUR_PRESSURE',
+      kind: 'VAPOUR_PRESSURE' as const,
       label: 'Vapour pressure',
       symbol: 'p_sat',
       value: null,
