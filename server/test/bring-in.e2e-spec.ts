@@ -193,6 +193,20 @@ describe('bringing a table in', () => {
       expect(second.body.rows[1].point.pressure).toBe(101_300);
     });
 
+    it('shows the beginning of a long table, and every row about which something is asked', async () => {
+      const rows = Array.from(
+        { length: 2000 },
+        (_, i) => `${300 + i / 10};101,325;${(0.127 * (1 + i / 3000) ** 1.75).toFixed(6)}`,
+      );
+      rows[1500] = 'broken;101,325;0,2';
+      const { body } = await read({ text: `T/K;p/kPa;D/cm²/s\n${rows.join('\n').replaceAll('.', ',')}\n` });
+
+      expect(body.source.rowCount).toBe(2000);
+      expect(body.rows).toHaveLength(501);
+      expect(body.rows.at(-1)).toMatchObject({ number: 1502, state: 'OPEN', point: null });
+      expect(body.pointCount).toBe(1999);
+    });
+
     it('changes nothing', async () => {
       const before = await counts();
       await read({ text: GOOD });

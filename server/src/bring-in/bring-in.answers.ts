@@ -6,7 +6,7 @@ import type { RowState, UnderstoodPoint } from './points.js';
 import { cellText, type DecimalSign, type Delimiter, type RawTable } from './table.js';
 import type { Understood } from './understand.js';
 
-/** So many rows and issues go into one answer; the rest are counted. */
+/** So many rows and issues go into one answer, and the rows of those issues; the rest are counted. */
 export const ROWS_SHOWN = 500;
 export const ISSUES_SHOWN = 500;
 
@@ -63,7 +63,8 @@ export interface ReadFacts {
 }
 
 export function readAnswer({ table, reasons, understood, expectation, usual }: ReadFacts): ReadAnswer {
-  const { mapping, points, issues } = understood;
+  const { mapping, points } = understood;
+  const issues = [...understood.issues].sort((x, y) => Number(isOpen(y)) - Number(isOpen(x))).slice(0, ISSUES_SHOWN);
   const header = table.rows.find(({ number }) => number === mapping.headerRow);
   return {
     source: {
@@ -78,9 +79,9 @@ export function readAnswer({ table, reasons, understood, expectation, usual }: R
     },
     columns: mapping.columns.map((_, i) => ({ header: cellText(header?.cells[i]), reason: reasons?.[i] ?? null })),
     mapping,
-    rows: shownRows(understood, expectation),
-    issues: [...issues].sort((x, y) => Number(isOpen(y)) - Number(isOpen(x))).slice(0, ISSUES_SHOWN),
-    issueCounts: countByCode(issues),
+    rows: shownRows(understood, issues, expectation),
+    issues,
+    issueCounts: countByCode(understood.issues),
     openCount: understood.openIssues.length,
     pointCount: points.length,
     temperature: spanOf(points.map(({ temperature }) => temperature)),
@@ -96,9 +97,16 @@ export function readAnswer({ table, reasons, understood, expectation, usual }: R
   };
 }
 
-function shownRows({ rows, states, points, mapping }: Understood, { estimate }: Expectation): ShownRow[] {
+/** The first rows, and those further down about which something is said. */
+function shownRows(
+  { rows, states, points, mapping }: Understood,
+  issues: readonly Issue[],
+  { estimate }: Expectation,
+): ShownRow[] {
   const byRow = new Map(points.map(({ row, ...point }) => [row, point]));
-  return rows.slice(0, ROWS_SHOWN).map((row, i) => {
+  const asked = new Set(issues.flatMap(({ row, sameAsRow }) => [row, sameAsRow]));
+  return rows.flatMap((row, i) => {
+    if (i >= ROWS_SHOWN && !asked.has(row.number)) return [];
     const point = byRow.get(row.number) ?? null;
     return {
       number: row.number,

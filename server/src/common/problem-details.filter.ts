@@ -24,7 +24,8 @@ export interface ProblemDetails {
   [member: string]: unknown;
 }
 
-function detailsOf(error: unknown): ProblemDetails {
+/** What an error says to the outside; an unexpected one says nothing of itself. */
+export function detailsOf(error: unknown): ProblemDetails {
   if (error instanceof ApiError) {
     return {
       type: 'about:blank',

@@ -4,6 +4,7 @@ import { Controller, Get, HttpException, Param, Post, Req, Res } from '@nestjs/c
 import { type FastifyReply, type FastifyRequest } from 'fastify';
 import { RolesMay, SignedInMay } from '../common/access.decorators.js';
 import { ApiError } from '../common/api-error.js';
+import { detailsOf } from '../common/problem-details.filter.js';
 import { CurrentViewer, type Viewer } from '../common/viewer.js';
 import { attachment } from './file-rules.js';
 import { FilesService } from './files.service.js';
@@ -30,13 +31,11 @@ export class FilesController {
     @Res({ passthrough: true }) reply: FastifyReply,
     @CurrentViewer() viewer: Viewer,
   ): Promise<UploadedFile> {
-    // What says that it is too large is not read at all; the connection ends with the answer.
-    if (Number(request.headers['content-length']) > MOST_BYTES + MULTIPART_BYTES) {
-      reply.header('connection', 'close');
-      throw tooLarge();
-    }
+    // What says that it is too large is not read at all.
+    if (Number(request.headers['content-length']) > MOST_BYTES + MULTIPART_BYTES) throw refuseTheRest(request, reply);
     const part = await filePart(request);
-    const bytes = await readPart(part, reply);
+    const bytes = await readPart(part);
+    if (bytes === null) throw refuseTheRest(request, reply);
     const { id, name, sha256, sizeBytes } = await this.files.keep(part.filename, bytes, viewer);
     return { id, name, size: Number(sizeBytes), sha256 };
   }
@@ -67,13 +66,11 @@ async function filePart(request: FastifyRequest): Promise<MultipartFile> {
   throw new ApiError('BAD_USER_INPUT', 'Send the file as the multipart field `file`.');
 }
 
-/** The bytes of the file; reading ends where the limit does. */
-async function readPart(part: MultipartFile, reply: FastifyReply): Promise<Buffer> {
+/** The bytes of the file; null when they go beyond the limit, where reading ends. */
+async function readPart(part: MultipartFile): Promise<Buffer | null> {
   const chunks: Buffer[] = [];
   for await (const chunk of part.file as AsyncIterable<Buffer>) chunks.push(chunk);
-  if (!part.file.truncated) return Buffer.concat(chunks);
-  reply.header('connection', 'close');
-  throw tooLarge();
+  return part.file.truncated ? null : Buffer.concat(chunks);
 }
 
 const tooLarge = (): HttpException =>
@@ -81,3 +78,32 @@ const tooLarge = (): HttpException =>
     { message: 'The file is larger than 20 MB. Bring it in as several tables.', code: 'TOO_LARGE' },
     413,
   );
+
+/** How long a sender has to notice the answer before the connection ends under what it still sends. */
+const NOTICE_MS = 2_000;
+
+/**
+ * Answers 413 while the request is still being sent, and reads no more of it. Ending the connection at once would break
+ * the sender's writing before it has read the answer.
+ *
+ * @returns the refusal, for the caller to throw; it finds the request answered
+ */
+function refuseTheRest(request: FastifyRequest, reply: FastifyReply): HttpException {
+  const refusal = tooLarge();
+  request.raw.unpipe();
+  request.raw.pause();
+  reply.hijack();
+  const body = JSON.stringify(detailsOf(refusal));
+  for (const [name, value] of Object.entries(reply.getHeaders())) {
+    if (value !== undefined) reply.raw.setHeader(name, value);
+  }
+  reply.raw.writeHead(413, {
+    'content-type': 'application/problem+json; charset=utf-8',
+    'content-length': Buffer.byteLength(body),
+    connection: 'close',
+  });
+  reply.raw.write(body);
+  const end = setTimeout(() => reply.raw.end(), NOTICE_MS);
+  request.raw.once('close', () => clearTimeout(end));
+  return refusal;
+}
