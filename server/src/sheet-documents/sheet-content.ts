@@ -63,7 +63,8 @@ const coverageFactorOf = (correlation: EvaluableCorrelation): number =>
 
 const sheetSubstance = (substance: SubstanceFacts): SheetSubstance => ({
   name: capitalised(substance.name),
-  formula: typesetFormula(substance.formula),
+  // A mixture such as air has no formula but its name.
+  formula: substance.formula.toLowerCase() === substance.name.toLowerCase() ? [] : typesetFormula(substance.formula),
   casNumber: substance.casNumber,
   molarMass: substance.molarMass,
 });

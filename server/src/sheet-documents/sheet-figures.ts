@@ -9,6 +9,8 @@ import { extremes, seriesKey } from './sheet-series.js';
 import { sheetStrings } from './sheet-strings.js';
 import { plain, typeset } from './typeset.js';
 
+/** How far beyond the rest a point that was left out may stretch the axis of deviations */
+const LEFT_OUT_REACH = 3;
 const CURVE_STEPS = 96;
 const ESTIMATE_STEPS = 48;
 /** Points of one series a figure can show apart; a longer series is thinned evenly. */
@@ -135,7 +137,7 @@ function axisOfDiffusivities(curve: FigureCurve, series: readonly FigureSeries[]
 
 /**
  * Wide enough for nineteen in twenty of the points that carried weight and for the bands, and for points left out that do not
- * lie more than twice as far away.
+ * lie more than three times as far away.
  */
 function axisOfDeviations(curve: FigureCurve, series: readonly FigureSeries[]): FigureAxis {
   const weighted = series
@@ -149,6 +151,8 @@ function axisOfDeviations(curve: FigureCurve, series: readonly FigureSeries[]): 
     ...(curve.relativeNewLaboratory === null ? [] : inside(curve.relativeNewLaboratory)),
   ].map((part) => 100 * part);
   const reach = 1.1 * Math.max(most, ...bands);
-  const shown = series.flatMap((one) => one.deviations).filter((deviation) => Math.abs(deviation) <= 2 * reach);
+  const shown = series
+    .flatMap((one) => one.deviations)
+    .filter((deviation) => Math.abs(deviation) <= LEFT_OUT_REACH * reach);
   return deviationAxis(Math.min(-reach, ...extremes(shown)), Math.max(reach, ...extremes(shown)));
 }

@@ -125,7 +125,9 @@ export const beyondLayer = (
   layer(5, points.length, false, (i, place) => {
     const point = points[i];
     if (point === undefined) return null;
-    const [x, y] = place(point.x, point.edge);
+    const [x, edge] = place(point.x, point.edge);
+    // Clear of the temperature rule, which lies on the lower edge.
+    const y = point.isAbove ? edge : edge - RULE_HEIGHT;
     const next = points[i + 1];
     const hasRoom = next === undefined || place(next.x, next.edge)[0] - x > BEYOND_LABEL_WIDTH;
     const down = point.isAbove ? 7 : -7;

@@ -15,7 +15,7 @@ import { VectorChart } from './vector-chart.js';
 const { axes, figureKeys } = sheetStrings;
 const MARGIN_SIZE = 7.8;
 const CAPTION_SIZE = 8.2;
-const HEIGHTS = { diffusivity: 330, deviation: 244 } as const;
+const HEIGHTS = { diffusivity: 306, deviation: 244 } as const;
 
 const fitLabelOf = ({ margin }: SheetContent): string => figureKeys.fit.replace('{number}', margin.fitNumber);
 
@@ -39,7 +39,14 @@ export function DiffusivitySection({ content }: { readonly content: SheetContent
 export function DeviationSection({ content }: { readonly content: SheetContent }) {
   const { figures, margin } = content;
   return (
-    <PrintRowWithMargin margin={<Paragraphs paragraphs={margin.figures} size={MARGIN_SIZE} />}>
+    <PrintRowWithMargin
+      margin={
+        <>
+          <Paragraphs paragraphs={margin.figures} size={MARGIN_SIZE} />
+          <DeviationKeys content={content} />
+        </>
+      }
+    >
       <Figure
         number={2}
         svg={deviationChart(figures, HEIGHTS.deviation)}
@@ -80,7 +87,7 @@ function Figure({ number, svg, axisTitle, caption }: FigureProps) {
 }
 
 function FigureKeys({ content, fitLabel }: { readonly content: SheetContent; readonly fitLabel: string }) {
-  const { series, estimates, curve } = content.figures;
+  const { series } = content.figures;
   return (
     <View style={styles.keys}>
       {series.map(({ key, mark, title, used }) => (
@@ -93,6 +100,15 @@ function FigureKeys({ content, fitLabel }: { readonly content: SheetContent; rea
       <Key mark={<LineKey colour={printPalette.band} width={0} isBand />}>
         <Runs runs={typeset(figureKeys.band)} size={MARGIN_SIZE} />
       </Key>
+    </View>
+  );
+}
+
+/** Lines that only the second figure has. */
+function DeviationKeys({ content }: { readonly content: SheetContent }) {
+  const { estimates, curve } = content.figures;
+  return (
+    <View style={styles.keys}>
       {curve.relativeNewLaboratory !== null && (
         <Key mark={<LineKey colour={printPalette.accent} width={1.2} dash={[1.5, 2.5]} />}>
           {figureKeys.newLaboratory}

@@ -61,7 +61,7 @@ export const styles = StyleSheet.create({
   },
   marginEmpty: { width: MARGIN_WIDTH },
   marginLine: { flexDirection: 'row' },
-  marginLabel: { width: millimetres(18), paddingRight: 4, color: printPalette.ink3 },
+  marginLabel: { width: millimetres(17), paddingRight: 2, color: printPalette.ink3 },
   marginValue: { flex: 1, color: printPalette.ink },
   marginParagraph: { marginBottom: 4 },
 

@@ -3,6 +3,7 @@ import { documentSubject, documentTitle } from '../document-names.js';
 import { formatShort, withUnit } from '../format-quantity.js';
 import type { SheetContent } from '../sheet-content.types.js';
 import { sheetStrings } from '../sheet-strings.js';
+import { plain } from '../typeset.js';
 import { StateMark } from './marks.js';
 import { PrintCorrelation } from './print-equation.js';
 import { DeviationSection, DiffusivitySection } from './print-figures.js';
@@ -131,7 +132,8 @@ function TitleSection({ content }: ContentProps) {
       {content.summary !== '' && <Text style={styles.identity}>{content.summary}</Text>}
       {content.substances.map(({ name, formula, casNumber, molarMass }, i) => (
         <Text key={i} style={[styles.identity, { marginTop: i === 0 ? 7 : 0 }]}>
-          <Text style={styles.strong}>{name}</Text> <Runs runs={formula} size={8.8} />
+          <Text style={styles.strong}>{name}</Text>
+          <Runs runs={formula.length === 0 ? [] : [...plain(' '), ...formula]} size={8.8} />
           {casNumber === null ? '' : `, ${casNumber}`}
           {`, ${withUnit(formatShort(1000 * molarMass), 'g/mol')}`}
         </Text>
