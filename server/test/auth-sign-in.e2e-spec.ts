@@ -68,21 +68,22 @@ describe('signing in', () => {
     }
   });
 
-  // CPU time of this process, server included, because the wall clock of a shared machine tells little.
+  // CPU time of this process, server included, because the wall clock of a shared machine tells little. Whoever comes
+  // first after a pause pays for fresh memory, so the two take turns at that.
   it('works as much for an unknown e-mail as for a wrong password', async () => {
-    const costs = { known: [] as number[], unknown: [] as number[] };
-    for (let i = 0; i < 9; i += 1) {
+    const costs = { known: 0, unknown: 0 };
+    await attempt('editor@group.example', 'not-the-password');
+    for (let i = 0; i < 10; i += 1) {
       await server.sql('DELETE FROM throttles');
-      for (const kind of ['known', 'unknown'] as const) {
+      for (const kind of i % 2 === 0 ? (['known', 'unknown'] as const) : (['unknown', 'known'] as const)) {
         const before = process.cpuUsage();
         await attempt(kind === 'known' ? 'editor@group.example' : `nobody${i}@group.example`, 'not-the-password');
-        costs[kind].push(process.cpuUsage(before).user);
+        costs[kind] += process.cpuUsage(before).user;
       }
     }
-    const median = (values: number[]) => values.sort((a, b) => a - b)[4]!;
 
-    expect(median(costs.unknown) / median(costs.known)).toBeGreaterThan(0.6);
-    expect(median(costs.unknown) / median(costs.known)).toBeLessThan(1.67);
+    expect(costs.unknown / costs.known).toBeGreaterThan(0.6);
+    expect(costs.unknown / costs.known).toBeLessThan(1.67);
   });
 
   it.each([

@@ -98,9 +98,9 @@ describe('the job queue', () => {
       return Promise.resolve();
     });
 
-    await server.eventually(() => Promise.resolve(runs > 0 ? true : undefined), 28_000);
+    await server.eventually(() => Promise.resolve(runs > 0 ? true : undefined), 45_000);
     expect(runs).toBe(1);
-  }, 30_000);
+  }, 60_000);
 
   it('makes one job for one key within its time', async () => {
     const queue = jobQueue<object>('test.once');

@@ -13,7 +13,7 @@ const QUERY_TIMEOUT_MS = 30_000;
 const POLLING_INTERVAL_SECONDS = 0.5;
 const BATCH_SIZE = 10;
 /** Looks for jobs whose server died, so that they run again. */
-const MAINTENANCE_INTERVAL_SECONDS = 30;
+const MAINTENANCE_INTERVAL_SECONDS = 10;
 const FAILED_KEPT_SECONDS = 14 * 24 * 3600;
 /** Longer than any `onceInSeconds`: the queue looks among the jobs kept for the one that was made already. */
 const COMPLETED_KEPT_SECONDS = 2 * 24 * 3600;
