@@ -111,12 +111,13 @@ export class DraftingService {
     });
   }
 
-  /** @throws {ApiError} NOT_FOUND */
-  submit(versionId: string, viewer: Viewer): Promise<Outcome<DataSheetVersion>> {
+  /** @throws {ApiError} NOT_FOUND, or CONFLICT when somebody acted on the version meanwhile */
+  async submit(versionId: string, viewer: Viewer): Promise<Outcome<DataSheetVersion>> {
+    const seen = await this.read(versionId);
+    const problems = transitionProblems('submit', { ...seen, seriesOwnerIds: [] }, viewer.id);
+    if (problems.length > 0) return refused(...problems);
     return this.write(async (tx) => {
-      const version = await this.lock(tx, versionId);
-      const problems = transitionProblems('submit', { ...version, seriesOwnerIds: [] }, viewer.id);
-      if (problems.length > 0) return refused(...problems);
+      const version = await this.lock(tx, versionId, seen.lockVersion);
       version.status = statusAfter('submit');
       const saved = await tx.save(version);
       await this.record(tx, saved, 'submit', null, viewer);
@@ -136,15 +137,15 @@ export class DraftingService {
   /**
    * The version, locked for a change.
    *
-   * @param seen the count of changes the caller looked at; checked when given
+   * @param seen the count of changes the caller looked at
    * @throws {ApiError} NOT_FOUND, or CONFLICT when it has grown since
    */
-  async lock(tx: EntityManager, versionId: string, seen?: number): Promise<DataSheetVersion> {
+  async lock(tx: EntityManager, versionId: string, seen: number): Promise<DataSheetVersion> {
     const version = isId(versionId)
       ? await tx.findOne(DataSheetVersion, { where: { id: versionId }, lock: LOCK })
       : null;
     if (!version) throw new ApiError('NOT_FOUND', 'There is no such version.');
-    if (seen !== undefined && version.lockVersion !== seen) {
+    if (version.lockVersion !== seen) {
       throw new ApiError(
         'CONFLICT',
         'Somebody else changed this version meanwhile. Load it again and repeat what you did.',

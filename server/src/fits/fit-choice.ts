@@ -28,21 +28,36 @@ export function recipeOf(input: FitCorrelationInput): FitRecipe {
   };
 }
 
-/** All accepted series, of those that repeat the same data only the one repeated. */
-function withoutRepeats(accepted: readonly Series[]): Series[] {
-  const ids = new Set(accepted.map((series) => series.id));
-  return accepted.filter((series) => series.sameDataAsId === null || !ids.has(series.sameDataAsId));
+/** The series whose data this one holds: followed from repeat to repeat to the first; itself where it repeats none. */
+function originOf(series: Series, all: readonly Series[]): Series {
+  const repeated = all.find((other) => other.id === series.sameDataAsId);
+  return repeated ? originOf(repeated, all) : series;
 }
 
-function repeatProblems(used: readonly Series[]): Problem[] {
-  const titles = new Map(used.map((series) => [series.id, series.title]));
+/** All accepted series, of those with the same data only one: the origin, or the first that came where it is not accepted. */
+function withoutRepeats(accepted: readonly Series[], all: readonly Series[]): Series[] {
+  const chosen = new Map<Series, Series>();
+  for (const series of accepted) {
+    const origin = originOf(series, all);
+    if (series === origin || !chosen.has(origin)) chosen.set(origin, series);
+  }
+  const carrying = new Set(chosen.values());
+  return accepted.filter((series) => carrying.has(series));
+}
+
+function repeatProblems(used: readonly Series[], all: readonly Series[]): Problem[] {
+  const first = new Map<Series, Series>();
   return used.flatMap((series) => {
-    const repeated = series.sameDataAsId === null ? undefined : titles.get(series.sameDataAsId);
-    if (repeated === undefined) return [];
+    const origin = originOf(series, all);
+    const other = first.get(origin);
+    if (!other) {
+      first.set(origin, series);
+      return [];
+    }
     return [
       problem(
         'BAD_INPUT',
-        `“${series.title}” repeats the data of “${repeated}”; only one of them carries weight.`,
+        `“${series.title}” holds the same data as “${other.title}”; only one of them carries weight.`,
         'seriesIds',
       ),
     ];
@@ -52,7 +67,7 @@ function repeatProblems(used: readonly Series[]): Problem[] {
 function chosenSeries(input: FitCorrelationInput, all: readonly Series[]): { used: Series[]; problems: Problem[] } {
   const accepted = all.filter((series) => series.status === 'ACCEPTED');
   if (!input.seriesIds) {
-    const used = withoutRepeats(accepted);
+    const used = withoutRepeats(accepted, all);
     return used.length > 0
       ? { used, problems: [] }
       : { used, problems: [problem('BAD_INPUT', 'This pair has no accepted series yet.', 'seriesIds')] };
@@ -69,7 +84,7 @@ function chosenSeries(input: FitCorrelationInput, all: readonly Series[]): { use
     } else used.add(series);
   });
   if (input.seriesIds.length === 0) problems.push(problem('BAD_INPUT', 'Choose at least one series.', 'seriesIds'));
-  return { used: [...used], problems: [...problems, ...repeatProblems([...used])] };
+  return { used: [...used], problems: [...problems, ...repeatProblems([...used], all)] };
 }
 
 function excludedPoints(
@@ -103,7 +118,7 @@ function leftOutSeries(
   return all
     .filter((series) => series.status === 'ACCEPTED' && !used.includes(series))
     .map((series) => {
-      const repeats = used.find((other) => other.id === series.sameDataAsId);
+      const repeats = used.find((other) => originOf(other, all) === originOf(series, all));
       const unsaid = repeats ? `duplicate: repeats the data of ${repeats.title}` : 'not chosen for this fit';
       return { seriesId: series.id, reason: reasons.get(series.id) || unsaid };
     });

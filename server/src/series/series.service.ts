@@ -191,16 +191,10 @@ export class SeriesService {
     const problems = [...headerProblems(input), ...(input.points ? pointProblems(input.points) : [])];
     if (problems.length > 0) return refused(...problems);
     return this.dataSource.transaction(async (tx) => {
-      const series = await this.lockOwn(tx, input.id, viewer);
-      if (series.lockVersion !== input.lockVersion) {
-        throw new ApiError(
-          'CONFLICT',
-          'Somebody else changed this series meanwhile. Load it again and repeat your change.',
-        );
-      }
+      const series = await this.lockOwn(tx, input.id, viewer, input.lockVersion);
       const refusals = [
         ...transitionProblems('change', series, viewer.id),
-        ...(await this.sameDataProblems(tx, input.sameDataAsId, series.pairId)),
+        ...(await this.sameDataProblems(tx, input.sameDataAsId, series.pairId, series.id)),
       ];
       if (refusals.length > 0) return refused(...refusals);
       Object.assign(series, headerOf(input), { status: statusAfter('change') });
@@ -208,6 +202,8 @@ export class SeriesService {
         series.warnings = warningsOf(input.points, input.method);
         await this.points.replace(tx, series.id, completePoints(input.points, input.method));
       }
+      // Counted here, because TypeORM counts no change where only the points differ.
+      series.lockVersion += 1;
       const saved = await tx.save(series);
       await this.record(tx, saved, 'change', null, viewer);
       return accepted(saved);
@@ -231,11 +227,18 @@ export class SeriesService {
     return this.change(id, 'retire', remark, viewer);
   }
 
-  private change(id: string, action: SeriesAction, remark: string | null, viewer: Viewer): Promise<Outcome<Series>> {
+  /** Judged by what stands before the lock is had: of two who act at once, one wins and the other hears CONFLICT. */
+  private async change(
+    id: string,
+    action: SeriesAction,
+    remark: string | null,
+    viewer: Viewer,
+  ): Promise<Outcome<Series>> {
+    const seen = await this.findOwn(this.dataSource.manager, id, viewer);
+    const problems = transitionProblems(action, seen, viewer.id, remark);
+    if (problems.length > 0) return refused(...problems);
     return this.dataSource.transaction(async (tx) => {
-      const series = await this.lockOwn(tx, id, viewer);
-      const problems = transitionProblems(action, series, viewer.id, remark);
-      if (problems.length > 0) return refused(...problems);
+      const series = await this.lockOwn(tx, id, viewer, seen.lockVersion);
       series.status = statusAfter(action);
       if (action === 'submit') series.submittedById = viewer.id;
       const saved = await tx.save(series);
@@ -255,9 +258,26 @@ export class SeriesService {
     });
   }
 
-  /** The series, locked; researchers touch their own, editors all. */
-  private async lockOwn(tx: EntityManager, id: string, viewer: Viewer): Promise<Series> {
-    const series = isId(id) ? await tx.findOne(Series, { where: { id }, lock: { mode: 'pessimistic_write' } }) : null;
+  /** The series, locked, as the caller saw it. @throws {ApiError} CONFLICT when it changed meanwhile */
+  private async lockOwn(tx: EntityManager, id: string, viewer: Viewer, seen: number): Promise<Series> {
+    const series = await this.findOwn(tx, id, viewer, { mode: 'pessimistic_write' });
+    if (series.lockVersion !== seen) {
+      throw new ApiError(
+        'CONFLICT',
+        'Somebody else changed this series meanwhile. Load it again and repeat your change.',
+      );
+    }
+    return series;
+  }
+
+  /** Researchers touch their own series, editors all. @throws {ApiError} NOT_FOUND, FORBIDDEN for somebody else's */
+  private async findOwn(
+    manager: EntityManager,
+    id: string,
+    viewer: Viewer,
+    lock?: { mode: 'pessimistic_write' },
+  ): Promise<Series> {
+    const series = isId(id) ? await manager.findOne(Series, { where: { id }, ...(lock && { lock }) }) : null;
     if (!series) throw new ApiError('NOT_FOUND', 'There is no such series.');
     if (series.createdById === viewer.id || hasRole(viewer, 'EDITOR')) return series;
     const isHidden = series.status === 'DRAFT' || series.status === 'RETURNED';
@@ -266,14 +286,24 @@ export class SeriesService {
       : new ApiError('FORBIDDEN', 'This series belongs to somebody else.');
   }
 
+  /** A series repeats another of its pair, and never, however roundabout, itself. */
   private async sameDataProblems(
     tx: EntityManager,
     sameDataAsId: string | null | undefined,
     pairId: string,
+    ownId: string | null = null,
   ): Promise<Problem[]> {
     if (!sameDataAsId) return [];
     const other = isId(sameDataAsId) ? await tx.findOneBy(Series, { id: sameDataAsId, pairId }) : null;
-    return other ? [] : [problem('BAD_INPUT', 'The series it repeats is not one of this pair.', 'sameDataAsId')];
+    if (!other) return [problem('BAD_INPUT', 'The series it repeats is not one of this pair.', 'sameDataAsId')];
+    const [circle]: object[] = await tx.query(
+      `WITH RECURSIVE chain AS (
+         SELECT id, same_data_as_id FROM series WHERE id = $1
+         UNION SELECT s.id, s.same_data_as_id FROM series s JOIN chain ON s.id = chain.same_data_as_id
+       ) SELECT FROM chain WHERE id = $2`,
+      [other.id, ownId],
+    );
+    return circle ? [problem('BAD_INPUT', 'A series does not repeat itself.', 'sameDataAsId')] : [];
   }
 
   private async record(
