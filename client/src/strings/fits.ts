@@ -149,6 +149,9 @@ export const fitStrings = {
       THREE_TERM: 'three terms',
       KINETIC_THEORY: 'kinetic theory',
     },
+    // The same for sentences, set.
+    setObjectives: { LN_DIFFUSIVITY: 'ln *D*', DIFFUSIVITY: '*D*' },
+    setWeightings: { EFFECTIVE_VARIANCE: '*u*(*D*), *u*(*T*) and *u*(*P*)', STATED: '*u*(*D*) alone', EQUAL: 'equal' },
     objectives: { LN_DIFFUSIVITY: 'ln D', DIFFUSIVITY: 'D' },
     weightings: { EFFECTIVE_VARIANCE: 'u(D), u(T) and u(P)', STATED: 'u(D) alone', EQUAL: 'equal' },
     losses: { LEAST_SQUARES: 'squares', HUBER: 'Huber', BISQUARE: 'bisquare' },

@@ -169,7 +169,10 @@ function Sides({ compared, common, at, pressure, pairId }: SidesProps) {
       )}
       <chakra.div
         display="grid"
-        gridTemplateColumns={{ base: '1fr', lg: compared.length > 2 ? '1fr' : '460px minmax(0, 1fr)' }}
+        gridTemplateColumns={{
+          base: 'minmax(0, 1fr)',
+          lg: compared.length > 2 ? 'minmax(0, 1fr)' : '460px minmax(0, 1fr)',
+        }}
         gap="8px 36px"
         marginTop="10px"
         alignItems="start"

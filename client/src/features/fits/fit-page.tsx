@@ -107,11 +107,11 @@ function Lead({ fit }: { readonly fit: DetailedFit }) {
   const { recipe, lead } = fitStrings;
   const values = {
     form: recipe.allForms[form],
-    objective: recipe.objectives[fit.objective],
+    objective: recipe.setObjectives[fit.objective],
     points: counted(lead.points, fit.statistics.pointCount),
     series: counted(lead.series, fit.statistics.seriesCount),
     range: rangeText('temperature', validity.temperatureMinimum, validity.temperatureMaximum, units.temperature, 5),
-    weighting: recipe.weightings[fit.weighting],
+    weighting: recipe.setWeightings[fit.weighting],
     effect: recipe.seriesEffects[fit.seriesEffect],
   };
   return <Typeset>{fill(words.leadForm, values)}</Typeset>;

@@ -85,7 +85,9 @@ function columnsOf(units: ReaderUnits): DataColumn<PairSeries>[] {
       wideOnly: true,
       value: weighted,
       cell: (row) =>
-        weighted(row) === row.points.length ? row.points.length : `${weighted(row)} of ${row.points.length}`,
+        !row.carriesWeight || weighted(row) === row.points.length
+          ? row.points.length
+          : `${weighted(row)} of ${row.points.length}`,
     },
     {
       id: 'T',

@@ -245,8 +245,8 @@ function RecipeBlock({ fit }: { readonly fit: DetailedFit }) {
       title={words.recipe}
       entries={[
         [recipe.form, recipe.allForms[form]],
-        [recipe.objective, recipe.objectives[fit.objective]],
-        [recipe.weighting, recipe.weightings[fit.weighting]],
+        [recipe.objective, <Typeset key="o">{recipe.setObjectives[fit.objective]}</Typeset>],
+        [recipe.weighting, <Typeset key="w">{recipe.setWeightings[fit.weighting]}</Typeset>],
         [recipe.loss, recipe.losses[fit.loss]],
         [recipe.seriesEffect, recipe.seriesEffects[fit.seriesEffect]],
         [

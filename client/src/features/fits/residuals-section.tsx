@@ -44,7 +44,11 @@ export function ResidualsSection({ series, validity }: ResidualsSectionProps) {
       }
     >
       <Residuals {...shared} number={1} against="temperature" />
-      <chakra.div display="grid" gridTemplateColumns={{ base: '1fr', lg: '1fr 1fr' }} gap="0 36px">
+      <chakra.div
+        display="grid"
+        gridTemplateColumns={{ base: 'minmax(0, 1fr)', lg: 'repeat(2, minmax(0, 1fr))' }}
+        gap="0 36px"
+      >
         <Residuals {...shared} number={2} against="pressure" />
         <Residuals {...shared} number={3} against="series" />
       </chakra.div>
