@@ -39,7 +39,7 @@ export function detailsOf(error: unknown): ProblemDetails {
     const body = error.getResponse();
     const members = typeof body === 'object' ? (body as Record<string, unknown>) : {};
     const { message: _message, statusCode: _status, error: _title, ...extensions } = members;
-    return { type: 'about:blank', title: error.name, status: error.getStatus(), detail: error.message, ...extensions };
+    return { ...extensions, type: 'about:blank', title: error.name, status: error.getStatus(), detail: error.message };
   }
   const status = (error as { statusCode?: unknown }).statusCode;
   if (typeof status === 'number' && status >= 400 && status < 500) {

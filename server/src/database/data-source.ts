@@ -19,12 +19,13 @@ const migrations = await classesIn(path.join(import.meta.dirname, 'migrations'),
 
 async function classesIn(folder: string, name: RegExp): Promise<Constructor[]> {
   const files = readdirSync(folder, { recursive: true, encoding: 'utf8' }).filter((file) => name.test(file));
-  const modules = await Promise.all(
-    files.sort().map((file) => import(pathToFileURL(path.join(folder, file)).href) as Promise<Record<string, unknown>>),
-  );
-  return modules
-    .flatMap((module) => Object.values(module))
-    .filter((value) => typeof value === 'function') as Constructor[];
+  const classes: Constructor[] = [];
+  // One after another: entities import each other, and Jest links a module that is being linked badly.
+  for (const file of files.sort()) {
+    const module = (await import(pathToFileURL(path.join(folder, file)).href)) as Record<string, unknown>;
+    classes.push(...(Object.values(module).filter((value) => typeof value === 'function') as Constructor[]));
+  }
+  return classes;
 }
 
 export function dataSourceOptions(url: string): DataSourceOptions {

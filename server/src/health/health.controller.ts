@@ -1,6 +1,7 @@
 import { Controller, Get } from '@nestjs/common';
-import { HealthCheck, HealthCheckService, TypeOrmHealthIndicator } from '@nestjs/terminus';
+import { HealthCheck, HealthCheckService, HealthIndicatorService, TypeOrmHealthIndicator } from '@nestjs/terminus';
 import { AnyoneMay } from '../common/access.decorators.js';
+import { StorageService } from '../storage/storage.service.js';
 
 const DATABASE_PING_TIMEOUT_MS = 1_000;
 
@@ -8,7 +9,9 @@ const DATABASE_PING_TIMEOUT_MS = 1_000;
 export class HealthController {
   constructor(
     private readonly health: HealthCheckService,
+    private readonly indicators: HealthIndicatorService,
     private readonly database: TypeOrmHealthIndicator,
+    private readonly storage: StorageService,
   ) {}
 
   /** The process answers. */
@@ -23,6 +26,19 @@ export class HealthController {
   @HealthCheck()
   @AnyoneMay()
   ready() {
-    return this.health.check([() => this.database.pingCheck('database', { timeout: DATABASE_PING_TIMEOUT_MS })]);
+    return this.health.check([
+      () => this.database.pingCheck('database', { timeout: DATABASE_PING_TIMEOUT_MS }),
+      () => this.storageCheck(),
+    ]);
+  }
+
+  private async storageCheck() {
+    const indicator = this.indicators.check('storage');
+    try {
+      await this.storage.ping();
+      return indicator.up();
+    } catch {
+      return indicator.down();
+    }
   }
 }
