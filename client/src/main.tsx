@@ -1,3 +1,4 @@
+import './lib/schemas-without-eval';
 import '@fontsource-variable/work-sans/wght.css';
 import '@fontsource-variable/work-sans/wght-italic.css';
 import './ui/fonts/symbols.css';

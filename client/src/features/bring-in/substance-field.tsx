@@ -25,13 +25,16 @@ interface SubstanceFieldProps {
 
 /** A substance by name, formula, synonym or CAS RN: a field with the matches under it, walked by arrow keys. */
 export function SubstanceField({ control, name, label }: SubstanceFieldProps) {
-  const { field, fieldState } = useController({ control, name });
+  const {
+    field: { ref, value, onChange, onBlur },
+    fieldState,
+  } = useController({ control, name });
   const error = fieldState.error?.message;
   const styles = useSlotRecipe({ recipe: fieldRecipe })({ invalid: error !== undefined });
   const id = useId();
   const [open, setOpen] = useState(false);
   const [active, setActive] = useState(-1);
-  const typed = field.value.name.trim();
+  const typed = value.name.trim();
   const search = useDebounced(typed, TYPING_MS);
   const {
     data,
@@ -46,15 +49,15 @@ export function SubstanceField({ control, name, label }: SubstanceFieldProps) {
   const isListed = open && found.length > 0;
 
   const choose = (substance: Found) => {
-    field.onChange({ id: substance.id, name: substance.name });
+    onChange({ id: substance.id, name: substance.name });
     setOpen(false);
     setActive(-1);
   };
   /** Leaving the field with a whole name in it chooses the substance of that name. */
   const settle = async () => {
-    field.onBlur();
+    onBlur();
     setOpen(false);
-    if (field.value.id !== '' || typed === '') return;
+    if (value.id !== '' || typed === '') return;
     const { data: answer } = await look({ variables: { search: typed } });
     const match = answer?.substances.edges.find(({ node }) => isNamed(node, typed));
     if (match) choose(match.node);
@@ -80,7 +83,7 @@ export function SubstanceField({ control, name, label }: SubstanceFieldProps) {
       <chakra.div css={styles.frame}>
         <chakra.input
           id={id}
-          ref={field.ref}
+          ref={ref}
           css={styles.control}
           role="combobox"
           autoComplete="off"
@@ -90,9 +93,9 @@ export function SubstanceField({ control, name, label }: SubstanceFieldProps) {
           aria-activedescendant={isListed && active >= 0 ? `${id}-${active}` : undefined}
           aria-describedby={`${id}-hint`}
           aria-invalid={error !== undefined || undefined}
-          value={field.value.name}
+          value={value.name}
           onChange={(event) => {
-            field.onChange({ id: '', name: event.target.value });
+            onChange({ id: '', name: event.target.value });
             setActive(-1);
             setOpen(true);
           }}
@@ -110,7 +113,7 @@ export function SubstanceField({ control, name, label }: SubstanceFieldProps) {
       <chakra.p css={styles.hint} id={`${id}-hint`} role="status">
         {hintOf({
           typed,
-          chosen: field.value.id !== '',
+          chosen: value.id !== '',
           open,
           loading: loading || search !== typed,
           failed: failed !== undefined,

@@ -1,0 +1,44 @@
+import AxeBuilder from '@axe-core/playwright';
+import { type Page } from '@playwright/test';
+import { findAddresses } from './addresses';
+import { type DemoAccount, expect, signIn, test } from './visitors';
+
+/** Criteria of WCAG 2.0, 2.1 and 2.2, levels A and AA, as axe-core tags them. */
+const CRITERIA = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
+
+const READERS: readonly [DemoAccount | null, string][] = [
+  [null, 'a visitor'],
+  ['researcher', 'a researcher'],
+  ['editor', 'an editor'],
+  ['editor2', 'a second editor'],
+  ['administrator', 'an administrator'],
+];
+
+for (const [account, who] of READERS) {
+  test(`no page of ${who} shuts anybody out, by day or by night`, async ({ visit, request }) => {
+    const page = await visit({ reducedMotion: 'reduce' });
+    if (account !== null) await signIn(page, account);
+    for (const address of await findAddresses(request, account)) {
+      await page.goto(address);
+      await settled(page);
+      expect(await violations(page), `${address} by day`).toEqual([]);
+      await page.getByRole('button', { name: 'Night edition' }).click();
+      expect(await violations(page), `${address} by night`).toEqual([]);
+      await page.getByRole('button', { name: 'Day edition' }).click();
+    }
+  });
+}
+
+/** The page with its data, not its hairlines. */
+async function settled(page: Page): Promise<void> {
+  await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
+  await expect(page.getByRole('status').filter({ hasText: /^Loading / })).toHaveCount(0);
+}
+
+/** What axe finds serious or critical, in words. */
+async function violations(page: Page): Promise<string[]> {
+  const { violations: found } = await new AxeBuilder({ page }).withTags(CRITERIA).analyze();
+  return found
+    .filter(({ impact }) => impact === 'serious' || impact === 'critical')
+    .map(({ id, nodes }) => `${id}: ${nodes.map(({ target }) => target.join(' ')).join('; ')}`);
+}
