@@ -1,4 +1,7 @@
 import { createHash } from 'node:crypto';
+import fs from 'node:fs';
+import os from 'node:os';
+import path from 'node:path';
 import { afterAll, beforeAll, describe, expect, it } from '@jest/globals';
 import { DEMO_PASSWORD, DemoSeeder } from '../seeds/demo/seed-demo.js';
 import { seedLibrary } from '../seeds/seed-library.js';
@@ -19,17 +22,22 @@ const DAY_ONE = /^@\d{10}$/;
 describe('data sheets as files', () => {
   let server: RunningServer;
   let versions: VersionRow[];
+  const pages = fs.mkdtempSync(path.join(os.tmpdir(), 'diffolio-pages-'));
   const oneThatIs = (status: string): VersionRow => versions.find((version) => version.status === status)!;
   const addressOf = ({ code, number }: VersionRow, extension = ''): string => `/sheets/${code}/${number}${extension}`;
   const bytes = (answer: { body: Buffer }): Buffer => answer.body;
 
   beforeAll(async () => {
-    server = await RunningServer.start();
+    fs.writeFileSync(path.join(pages, 'index.html'), '<!doctype html><title>Diffolio</title>');
+    server = await RunningServer.start({ DIFFOLIO_PAGES_DIR: pages });
     await seedLibrary(server.dataSource);
     await new DemoSeeder(server.app).seed();
     versions = await server.sql<VersionRow>(VERSIONS);
   }, 120_000);
-  afterAll(() => server.stop());
+  afterAll(async () => {
+    await server.stop();
+    fs.rmSync(pages, { recursive: true });
+  });
 
   it('gives a released version as JSON, with its correlation in full and what the sheet says', async () => {
     const released = oneThatIs('RELEASED');
@@ -61,6 +69,28 @@ describe('data sheets as files', () => {
     expect(refused.headers['content-type']).toMatch('application/problem+json');
     expect(refused.body.offered).toContain('application/pdf');
     await server.http.get(`${address}.xml`).expect(406);
+  });
+
+  it('gives a browser the page, which is never kept, whatever the version', async () => {
+    const browser = 'text/html,application/xhtml+xml,application/xml;q=0.9,*/*;q=0.8';
+    const { code } = oneThatIs('RELEASED');
+    for (const address of [
+      addressOf(oneThatIs('RELEASED')),
+      addressOf(oneThatIs('IN_REVIEW')),
+      `/sheets/${code}/9.9`,
+    ]) {
+      const answer = await server.http.get(address).set('Accept', browser).expect(200);
+      expect(answer.headers).toMatchObject({ 'cache-control': 'no-cache', vary: 'Accept' });
+      expect(answer.text).toContain('<title>Diffolio</title>');
+    }
+    await server.http.get(`/sheets/${code}`).set('Accept', browser).expect(302);
+    await server.http.get('/sheets/DS-9999').set('Accept', browser).expect(200);
+    // An extension says what is wanted, whoever asks.
+    const pdf = await server.http
+      .get(addressOf(oneThatIs('RELEASED'), '.pdf'))
+      .set('Accept', browser)
+      .expect(200);
+    expect(pdf.headers['content-type']).toBe('application/pdf');
   });
 
   it('gives a CSV that says first what its numbers are', async () => {
@@ -113,6 +143,27 @@ describe('data sheets as files', () => {
     expect(answer.headers['deprecation']).toMatch(DAY_ONE);
     expect(answer.text).toContain('Do not use its numbers');
     await server.http.get(`/releases/${withdrawn.contentHash}.json`).expect(200);
+  });
+
+  it('says so at once when a version that was just read is withdrawn', async () => {
+    const { code, number } = versions.filter((version) => version.status === 'RELEASED').at(-1)!;
+    const address = `/sheets/${code}/${number}.json`;
+    expect((await server.http.get(address)).headers['deprecation']).toBeUndefined();
+    const { accessToken } = await server.signIn('editor2@demo.example', DEMO_PASSWORD);
+    const { data } = await server.ask(
+      'query ($code: String!, $number: String!) { dataSheet(code: $code) { version(number: $number) { id } } }',
+      { code, number },
+    );
+    await server.ask(
+      `mutation ($id: ID!, $password: String!) {
+        withdrawDataSheet(versionId: $id, reason: "A bath was misread", password: $password) { problems { code } } }`,
+      { id: data!['dataSheet'].version.id, password: DEMO_PASSWORD },
+      accessToken,
+    );
+    const answer = await server.http.get(address).expect(200);
+    expect(answer.headers['deprecation']).toMatch(DAY_ONE);
+    expect(answer.body.standing).toMatchObject({ status: 'WITHDRAWN', withdrawalReason: 'A bath was misread' });
+    await server.http.get(`/sheets/${code}`).expect(404);
   });
 
   it('leads to the current version, and nowhere where there is none', async () => {

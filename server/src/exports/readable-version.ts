@@ -12,4 +12,7 @@ export interface ReadableVersion {
   readonly standing: StandingFacts;
   readonly versions: readonly VersionFacts[];
   readonly isReleased: boolean;
+  readonly versionId: string;
+  /** Counts the changes of the version, of its standing too */
+  readonly changes: number;
 }

@@ -42,10 +42,11 @@ export class ReadableVersionsService {
 
   /** @throws {ApiError} NOT_FOUND where there is none that the viewer may see */
   async read(code: string, number: string, viewer: Viewer | null): Promise<ReadableVersion> {
-    const known = this.remembered(code, number);
-    if (known !== undefined) return known;
     const version = await this.find(code, number, viewer);
     if (version === null) throw new ApiError('NOT_FOUND', `There is no version ${number} of a data sheet ${code}.`);
+    const known = this.remembered(code, number);
+    // A change of standing in this process is seen at once: it counts the version's changes up.
+    if (known?.versionId === version.id && known.changes === version.lockVersion) return known;
     const release = await this.releases.findByVersion(version.id);
     if (release === null) return this.open(code, version);
     const readable = await this.readRelease(version, release);
@@ -81,6 +82,8 @@ export class ReadableVersionsService {
       standing,
       versions,
       isReleased: true,
+      versionId: version.id,
+      changes: version.lockVersion,
     };
   }
 
@@ -96,7 +99,9 @@ export class ReadableVersionsService {
   private async open(code: string, version: DataSheetVersion): Promise<ReadableVersion> {
     const facts = await this.facts.factsOf(version);
     const { correlation, standing, versions, number } = facts;
-    return { code, number, content: buildSheetContent(facts), correlation, standing, versions, isReleased: false };
+    const content = buildSheetContent(facts);
+    const named = { code, number, versionId: version.id, changes: version.lockVersion, isReleased: false };
+    return { ...named, content, correlation, standing, versions };
   }
 }
 
