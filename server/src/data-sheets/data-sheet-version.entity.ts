@@ -62,7 +62,7 @@ export class DataSheetVersion implements Node {
   @Column('uuid', { name: 'prepared_by_id' })
   preparedById: string;
 
-  @VersionColumn({ name: 'lock_version' })
+  @VersionColumn({ name: 'lock_version', default: 1 })
   @Field(() => Int, { description: 'Counts changes; an update names the one it was made from.' })
   lockVersion: number;
 

@@ -1,5 +1,5 @@
 import { Field, ID, ObjectType } from '@nestjs/graphql';
-import { Column, Entity, PrimaryGeneratedColumn } from 'typeorm';
+import { Column, CreateDateColumn, Entity, PrimaryGeneratedColumn } from 'typeorm';
 import { Node } from '../common/graphql/node.js';
 
 @Entity({ name: 'gas_pairs' })
@@ -14,4 +14,7 @@ export class GasPair implements Node {
 
   @Column('uuid', { name: 'second_id' })
   secondId: string;
+
+  @CreateDateColumn({ name: 'created_at', type: 'timestamptz' })
+  createdAt: Date;
 }

@@ -93,7 +93,7 @@ export class Series implements Node {
   @Column('uuid', { name: 'submitted_by_id', nullable: true })
   submittedById: string | null;
 
-  @VersionColumn({ name: 'lock_version' })
+  @VersionColumn({ name: 'lock_version', default: 1 })
   @Field(() => Int, { description: 'Counts changes; an update names the one it was made from.' })
   lockVersion: number;
 

@@ -120,7 +120,7 @@ export class Substance implements Node {
   @Column('uuid', { name: 'created_by_id', nullable: true })
   createdById: string | null;
 
-  @VersionColumn({ name: 'lock_version' })
+  @VersionColumn({ name: 'lock_version', default: 1 })
   @Field(() => Int, { description: 'Counts changes; an update names the one it was made from.' })
   lockVersion: number;
 
