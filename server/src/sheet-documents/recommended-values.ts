@@ -14,7 +14,7 @@ const MOST_ROWS = 18;
  *
  * @returns ascending, K
  */
-export function recommendedTemperatures(correlation: EvaluableCorrelation): number[] {
+function recommendedTemperatures(correlation: EvaluableCorrelation): number[] {
   const { temperatureMinimum: minimum, temperatureMaximum: maximum } = correlation.validity;
   const step = roundStep(maximum - minimum, MOST_ROWS);
   const temperatures = new Set([minimum, maximum]);

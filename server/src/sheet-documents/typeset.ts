@@ -1,7 +1,5 @@
 import type { TextRun, TextStyle } from './typeset.types.js';
 
-const NO_BREAK_SPACE = '\u00a0';
-
 /** `**strong**`, `*quantity*`, `_{sub}`, `^{super}`, `{name of a value}` */
 const MARK = /\*\*([^*]+)\*\*|\*([^*]+)\*|_\{([^}]*)\}|\^\{([^}]*)\}|\{(\w+)\}/g;
 const STYLE_OF_GROUP: readonly TextStyle[] = ['STRONG', 'QUANTITY', 'SUBSCRIPT', 'SUPERSCRIPT'];
@@ -46,9 +44,6 @@ export function typesetFormula(formula: string): TextRun[] {
   }
   return runs;
 }
-
-/** Keeps numbers and their units on one line. */
-export const keepTogether = (text: string): string => text.replaceAll(' ', NO_BREAK_SPACE);
 
 function append(runs: TextRun[], run: TextRun): void {
   if (run.text === '') return;

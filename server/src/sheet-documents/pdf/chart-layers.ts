@@ -9,7 +9,7 @@ export type Place = (x: number, y: number) => [number, number];
 export type XY = readonly [number, number];
 
 /** A layer of one element for each index; `clip` keeps it inside the axes. */
-export function layer(
+function layer(
   z: number,
   count: number,
   clip: boolean,

@@ -20,7 +20,7 @@ import { printPalette } from './print-palette.js';
 
 /** Width of the column at 96 px to the inch. */
 export const CHART_WIDTH = 484;
-export const CHART_MARGINS = { left: 46, right: 12, top: 8, bottom: 26 } as const;
+const CHART_MARGINS = { left: 46, right: 12, top: 8, bottom: 26 } as const;
 /** Room at the right end of the axis for its title */
 const AXIS_TITLE_WIDTH = 40;
 const DASHES: readonly (number[] | undefined)[] = [undefined, [6, 3], [2, 2]];

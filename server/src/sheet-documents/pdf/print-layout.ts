@@ -1,8 +1,8 @@
 import { StyleSheet } from '@react-pdf/renderer';
 import { printPalette } from './print-palette.js';
 
-export const POINTS_PER_MM = 72 / 25.4;
-export const millimetres = (length: number): number => length * POINTS_PER_MM;
+const POINTS_PER_MM = 72 / 25.4;
+const millimetres = (length: number): number => length * POINTS_PER_MM;
 
 /** Sizes of paper, with the same column and margin on each. */
 export const PAPERS = {
