@@ -41,7 +41,7 @@ export function ReleaseForm({ version, onReload }: ReleaseFormProps) {
     const outcome = data?.releaseDataSheet;
     if (outcome?.version) {
       // The sheet, its older versions and every list know of it now.
-      await client.resetStore();
+      await client.clearStore();
       return navigate(paths.version(sheet.code, outcome.version.number));
     }
     resetField('password');

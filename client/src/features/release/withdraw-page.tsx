@@ -97,7 +97,7 @@ function WithdrawSection({ version }: { readonly version: Version }) {
     });
     const outcome = data?.withdrawDataSheet;
     if (outcome?.version) {
-      await client.resetStore();
+      await client.clearStore();
       return navigate(paths.version(sheet.code, outcome.version.number));
     }
     resetField('password');
