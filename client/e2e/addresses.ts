@@ -21,7 +21,7 @@ interface Sheet {
   readonly versions: readonly { readonly id: string; readonly number: string; readonly status: string }[];
 }
 
-/** Every address that a person of the demo can open, one of each kind; versions in each state. */
+/** Addresses that a person of the demo can open and those before could not, one of each kind; versions in each state. */
 export async function findAddresses(request: APIRequestContext, account: DemoAccount | null): Promise<string[]> {
   const ask = await asking(request, account);
   const { substances, dataSheets } = await ask(FIRST_OF_EACH, {});
@@ -33,7 +33,7 @@ export async function findAddresses(request: APIRequestContext, account: DemoAcc
   const shown = inState('RELEASED', 'SUPERSEDED', 'WITHDRAWN').map(({ code, number }) => `/sheets/${code}/${number}`);
   const open = [...EVERYONE, substance, ...shown];
   if (account === null) return open;
-  if (account === 'administrator') return [...open, '/home', '/people', '/mail', '/jobs'];
+  if (account === 'administrator') return ['/home', '/people', '/mail', '/jobs'];
 
   const pairId = sheets[0]?.pair.id ?? '';
   const { node } = await ask(WORK_OF_A_PAIR, { id: pairId });
@@ -49,11 +49,12 @@ export async function findAddresses(request: APIRequestContext, account: DemoAcc
     `/fits/compare?fits=${fits.slice(0, 2).join(',')}`,
   ];
   if (account === 'researcher') return work;
-  const edited = inState('DRAFT', 'RETURNED').map(({ id }) => `/versions/${id}/edit`);
   const reviewed = inState('IN_REVIEW').map(({ id }) => `/versions/${id}/review`);
   const released = inState('APPROVED').map(({ id }) => `/versions/${id}/release`);
+  if (account === 'editor2') return ['/home', ...reviewed, ...released];
+  const edited = inState('DRAFT', 'RETURNED').map(({ id }) => `/versions/${id}/edit`);
   const withdrawn = inState('RELEASED').map(({ id }) => `/versions/${id}/withdraw`);
-  return [`/fits/${fits[0]}/draft`, ...edited, ...reviewed, ...released, ...withdrawn];
+  return ['/home', `/series/${series}`, `/fits/${fits[0]}/draft`, ...edited, ...withdrawn];
 }
 
 /** Asks GraphQL as a person of the demo, or as nobody. */
