@@ -1,10 +1,13 @@
 import { useApolloClient } from '@apollo/client/react';
 import { useMutation, useQuery } from '@tanstack/react-query';
-import { useEffect } from 'react';
+import { useEffect, useState } from 'react';
+import { useDebounced } from '../../lib/use-debounced';
 import { type ImportProgress } from './answer';
 import { cancelImport, importProgress, keepTable } from './requests';
 
 const ASKED_EVERY_MS = 700;
+/** Short imports are over before anybody asks how far they are. */
+const SHORT_MS = 1500;
 const isOver = ({ phase }: ImportProgress): boolean => ['DONE', 'REFUSED', 'CANCELLED'].includes(phase);
 
 /** An import: begun, followed, cancelled, and found again after a reload. */
@@ -29,14 +32,17 @@ export function useKeeping(importId: string | null, onKept: (seriesId: string) =
       onKept(seriesId);
     },
   });
+  const [foundId] = useState(importId);
+  const isLong = useDebounced(keeping.isPending, SHORT_MS) && keeping.isPending;
+  const followedId = keeping.isIdle ? foundId : isLong ? importId : null;
   const followed = useQuery({
-    queryKey: ['bring-in', 'import', importId],
-    queryFn: () => importProgress(importId ?? ''),
-    enabled: importId !== null && !keeping.isError,
+    queryKey: ['bring-in', 'import', followedId],
+    queryFn: () => importProgress(followedId ?? ''),
+    enabled: followedId !== null,
     refetchInterval: ({ state }) => (state.data && isOver(state.data) ? false : ASKED_EVERY_MS),
     staleTime: 0,
   });
-  const progress = importId === null ? null : (followed.data ?? null);
+  const progress = followedId === null ? null : (followed.data ?? null);
   const keptBefore = keeping.isIdle ? progress?.kept?.seriesId : undefined;
   useEffect(() => {
     if (keptBefore !== undefined) onKept(keptBefore);
