@@ -12,10 +12,11 @@ export const KeysBlock = () => (
   </MarginBlock>
 );
 
-export const BringInBlock = () => (
+/** Into the pair at hand. */
+export const BringInBlock = ({ pairId }: { readonly pairId: string }) => (
   <MarginBlock>
     <p>
-      <Link to={paths.newSeries()}>{words.bringIn}</Link>
+      <Link to={paths.newSeries(pairId)}>{words.bringIn}</Link>
     </p>
   </MarginBlock>
 );

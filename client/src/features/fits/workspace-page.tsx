@@ -104,7 +104,7 @@ function Workspace({ pair }: { readonly pair: Pair }) {
         margin={
           <>
             <KeysBlock />
-            <BringInBlock />
+            <BringInBlock pairId={pair.id} />
           </>
         }
       >
