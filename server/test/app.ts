@@ -22,6 +22,7 @@ export async function startTestApp(settings: Record<string, string> = {}): Promi
     NODE_ENV: 'test',
     LOG_LEVEL: 'fatal',
     PORT: '0',
+    PASSWORD_MEMORY_KIB: '64',
     DATABASE_URL: database.url,
     DIFFOLIO_DATA_DIR: dataFolder,
     ...settings,

@@ -1,7 +1,11 @@
 import { createHash } from 'node:crypto';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from '@jest/globals';
 import { hash } from '@node-rs/argon2';
+import { readEnv } from '../src/config/env.js';
 import { cookieOf, PASSWORD, RunningServer, setCookies } from './running-server.js';
+
+/** Enough that a hash not made would show in the time, little enough for a test. */
+const HASH_MEMORY_KIB = 8 * 1024;
 
 describe('signing in', () => {
   let server: RunningServer;
@@ -9,7 +13,7 @@ describe('signing in', () => {
     server.http.post('/api/auth/sign-in').set(headers).send({ email, password });
 
   beforeAll(async () => {
-    server = await RunningServer.start();
+    server = await RunningServer.start({ PASSWORD_MEMORY_KIB: String(HASH_MEMORY_KIB) });
     await server.addPerson('editor@group.example', 'EDITOR', 'RESEARCHER');
   });
   afterAll(() => server.stop());
@@ -99,6 +103,11 @@ describe('signing in', () => {
     expect(answer.headers['content-type']).toMatch(/^application\/problem\+json/);
   });
 
+  // OWASP ASVS 5.0.0, appendix C: argon2id with m ≥ 12 MiB at t ≥ 3.
+  it('hashes with 64 MiB where no setting says otherwise', () => {
+    expect(readEnv({ DATABASE_URL: 'postgres://nobody@127.0.0.1/none' }).PASSWORD_MEMORY_KIB).toBe(64 * 1024);
+  });
+
   it('hashes again with the present parameters a password that an older setting hashed', async () => {
     const older = await hash(PASSWORD, { memoryCost: 19_456, timeCost: 2, parallelism: 1 });
     await server.addPerson('longstanding@group.example', 'RESEARCHER');
@@ -110,7 +119,8 @@ describe('signing in', () => {
       'SELECT password_hash FROM people WHERE password_hash <> $1',
       [''],
     );
-    for (const { password_hash } of rows) expect(password_hash).toMatch(/^\$argon2id\$v=19\$m=65536,t=3,p=1\$/);
+    for (const { password_hash } of rows)
+      expect(password_hash).toContain(`$argon2id$v=19$m=${HASH_MEMORY_KIB},t=3,p=1$`);
     await server.signIn('longstanding@group.example');
   });
 

@@ -16,6 +16,12 @@ const schema = z.object({
   DIFFOLIO_DEMO: flag.default(false),
   /** Signs access tokens; drawn at random when absent, which signs everybody out at a restart. */
   JWT_SECRET: z.string().min(32).optional(),
+  /** Memory of one password hash; less only where passwords guard nothing, as in tests. */
+  PASSWORD_MEMORY_KIB: z.coerce
+    .number()
+    .int()
+    .min(8)
+    .default(64 * 1024),
   S3_ENDPOINT: z.url().optional(),
   S3_BUCKET: z.string().default('diffolio'),
   S3_REGION: z.string().default('us-east-1'),

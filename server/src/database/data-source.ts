@@ -4,7 +4,7 @@ import { pathToFileURL } from 'node:url';
 import { DataSource, type DataSourceOptions } from 'typeorm';
 
 /** How long the server waits for PostgreSQL before it says so, ms. A database that hangs must not hang its callers. */
-const CONNECT_TIMEOUT_MS = 2_000;
+const CONNECT_TIMEOUT_MS = 5_000;
 const STATEMENT_TIMEOUT_MS = 60_000;
 const IDLE_IN_TRANSACTION_TIMEOUT_MS = 30_000;
 
