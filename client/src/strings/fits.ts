@@ -192,7 +192,7 @@ export const fitStrings = {
   decides: {
     scatterMet: 'The points scatter as their uncertainties say.',
     scatterNotMet: 'The points scatter more than their uncertainties say.',
-    scatterReason: 'χ²/ν = {reduced}, ν = {nu}, p = {p}.',
+    scatterReason: 'χ²/ν = {reduced}, ν = {nu}, p {p}.',
     noUncertainties: 'The weights are equal.',
     noUncertaintiesReason:
       'Whether the points scatter as stated cannot be told; the scatter itself makes the uncertainty.',

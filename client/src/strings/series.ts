@@ -15,10 +15,8 @@ export const seriesStrings = {
     any: 'in any state',
     series: 'Series',
     pair: 'Pair',
-    method: 'Method',
     points: '*n*',
     temperature: '*T*',
-    by: 'By',
     since: 'Brought in',
     stateHead: 'State',
     empty: 'No series here yet.',
@@ -39,8 +37,9 @@ export const seriesStrings = {
   lead: '{points} of {pair}, {range}, by {method}.',
   points: ['No points', 'One point', '{n} points'],
 
-  returnedBanner: 'Returned by {person} on {date}',
-  retiredBanner: 'Retired by {person} on {date}',
+  returnedBanner: 'Returned',
+  retiredBanner: 'Retired',
+  saidBy: '{person}, {date}:',
   retiredWords: 'It carries no weight in new fits; fits and sheets that used it stay as they are.',
 
   margin: {

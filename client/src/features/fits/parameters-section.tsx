@@ -13,6 +13,7 @@ import { DataTable, type DataColumn } from '../../ui/table/data-table';
 import { type DetailedFit } from './fit-page';
 import { ParameterSymbol, quantityOf } from './parameter';
 import { TauSlope } from './result-block';
+import { deviationText } from './small-number';
 import { probability } from './statements';
 
 const words = fitStrings.fitPage;
@@ -47,9 +48,9 @@ export function ParametersSection({ fit }: { readonly fit: DetailedFit }) {
               <Typeset key="t">{words.intercept}</Typeset>,
               statistics.betweenSeriesDeviation == null
                 ? null
-                : withUnit(formatShort(100 * statistics.betweenSeriesDeviation, 2), '%'),
+                : withUnit(deviationText(100 * statistics.betweenSeriesDeviation), '%'),
             ],
-            [<Slope key="s" />, slope == null ? null : formatShort(slope, 2)],
+            [<Slope key="s" />, slope == null ? null : deviationText(slope)],
             [
               <Typeset key="i">{words.iSquared}</Typeset>,
               statistics.iSquared == null ? null : withUnit(formatNumber(100 * statistics.iSquared, 0), '%'),
@@ -70,7 +71,7 @@ export function ParametersSection({ fit }: { readonly fit: DetailedFit }) {
                 : formatNumber(statistics.chiSquare, 1) +
                   (statistics.chiSquareProbability == null
                     ? ''
-                    : `, p = ${probability(statistics.chiSquareProbability)}`),
+                    : `, p ${probability(statistics.chiSquareProbability)}`),
             ],
             [
               <Typeset key="r">{words.reduced}</Typeset>,

@@ -15,7 +15,7 @@ import { type Choice, type ChoiceAction } from './choice';
 import { type PairSeries } from './pair-series';
 import { RecipeForm } from './recipe-form';
 import { Fading, ResultBlock } from './result-block';
-import { doubt } from './statements';
+import { asSentence, doubt } from './statements';
 import { type Preview } from './use-preview';
 import { MarginStatements } from './warnings';
 import { type Pair } from './workspace-page';
@@ -72,7 +72,7 @@ function Problems({ preview: { problems, error, analysis, retry } }: { readonly 
   const kept = analysis === null ? '' : ` ${words.lastGood}`;
   if (error) return <Failed what={words.problems} why={errorMessage(error) + kept} onRetry={retry} />;
   if (problems.length === 0) return null;
-  const why = problems.map(({ message }) => (/[.!?]$/.test(message) ? message : `${message}.`)).join(' ');
+  const why = problems.map(({ message }) => asSentence(message)).join(' ');
   return <Failed what={words.problems} why={why + kept} />;
 }
 
@@ -93,7 +93,8 @@ function Keep({ pair, input, kept, ready, forget }: KeepProps) {
     errorPolicy: 'all',
   });
   const refused =
-    data?.fitCorrelation.problems.map(({ message }) => message).join(' ') || (error ? errorMessage(error) : undefined);
+    data?.fitCorrelation.problems.map(({ message }) => asSentence(message)).join(' ') ||
+    (error ? errorMessage(error) : undefined);
   const run = async () => {
     if (input === null) return;
     const answer = await keep({ variables: { input } });

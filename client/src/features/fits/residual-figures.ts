@@ -95,7 +95,7 @@ function axisOf(
     );
     return { x: pressureAxis(range, units), range };
   }
-  const range = { min: -0.6, max: used.length - 0.2 };
+  const range = { min: -0.6, max: used.length + 0.3 };
   const axis: AxisSpec = {
     ...range,
     ticks: used.map((_, i) => i),

@@ -2,12 +2,13 @@ import { chakra } from '@chakra-ui/react';
 import { type ReactNode } from 'react';
 import { type AnalysisNumbersFragment, type CorrelationNumbersFragment } from '../../gql/graphql';
 import { fill } from '../../lib/fill';
-import { formatNumber, formatShort } from '../../lib/format-quantity';
+import { formatNumber } from '../../lib/format-quantity';
 import { fitStrings } from '../../strings/fits';
 import { Num } from '../../ui/numbers/num';
 import { Typeset } from '../../ui/numbers/typeset';
 import { MarginBlock, type MarginEntry } from '../../ui/page/margin-block';
 import { ParameterSymbol, ParameterValue } from './parameter';
+import { deviationText } from './small-number';
 import { probability } from './statements';
 
 const words = fitStrings.result;
@@ -33,12 +34,9 @@ export function ResultBlock({ analysis, pointCount, stale }: ResultBlockProps) {
       <Typeset key="tau">{words.tau}</Typeset>,
       tau == null
         ? null
-        : `${formatShort(100 * tau, 2)}\u00a0%${statistics.betweenSeriesOrigin === 'ASSIGNED' ? `, ${words.assigned}` : ''}`,
+        : `${deviationText(100 * tau)}\u00a0%${statistics.betweenSeriesOrigin === 'ASSIGNED' ? `, ${words.assigned}` : ''}`,
     ],
-    [
-      <TauSlope key="slope" />,
-      betweenSeriesSlopeDeviation == null ? null : formatShort(betweenSeriesSlopeDeviation, 2),
-    ],
+    [<TauSlope key="slope" />, betweenSeriesSlopeDeviation == null ? null : deviationText(betweenSeriesSlopeDeviation)],
     [
       <Typeset key="chi">{words.chiSquare}</Typeset>,
       reducedChiSquare == null ? null : (
@@ -94,7 +92,7 @@ const ChiSquare = ({
     {formatNumber(reduced, 2)}, <i>ν</i> = {nu}
     {p !== null && (
       <>
-        , <i>p</i> = {probability(p)}
+        , <i>p</i> {probability(p)}
       </>
     )}
   </Num>

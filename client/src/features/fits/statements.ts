@@ -2,6 +2,7 @@ import { type StatisticsNumbersFragment } from '../../gql/graphql';
 import { fill } from '../../lib/fill';
 import { formatNumber, formatShort } from '../../lib/format-quantity';
 import { fitStrings } from '../../strings/fits';
+import { deviationText } from './small-number';
 
 /** A test or a doubt as a sentence: what it finds, then why. */
 export interface Statement {
@@ -25,7 +26,19 @@ const GRAVE = new Set([
   'STRONG_CORRELATION',
 ]);
 
-const asSentence = (text: string): string => (/[.!?]$/.test(text) ? text : `${text}.`);
+const { recipe } = fitStrings;
+const NAMES: Readonly<Record<string, string>> = {
+  ...recipe.allForms,
+  ...recipe.losses,
+  ...recipe.seriesEffects,
+  ...recipe.objectives,
+};
+
+/** A message of the service as a sentence, the choices in it named as the recipe names them. */
+export function asSentence(message: string): string {
+  const named = message.replace(/\b[A-Z]+(_[A-Z]+)*\b/g, (name) => NAMES[name] ?? name);
+  return /[.!?]$/.test(named) ? named : `${named}.`;
+}
 
 /** A doubt of the service as a sentence, parted at its first colon. */
 export function doubt({ code, message }: FitWarning): Statement {
@@ -60,7 +73,7 @@ function scatter(statistics: StatisticsNumbersFragment): Statement[] {
 function betweenSeries(statistics: StatisticsNumbersFragment): Statement[] {
   const { betweenSeriesDeviation: tau, betweenSeriesOrigin, cochranQ, seriesCount } = statistics;
   if (tau == null || cochranQ == null || betweenSeriesOrigin !== 'STATED') return [];
-  const values = { tau: formatShort(100 * tau, 2), q: formatNumber(cochranQ, 1), nu: seriesCount - 1 };
+  const values = { tau: deviationText(100 * tau), q: formatNumber(cochranQ, 1), nu: seriesCount - 1 };
   const differ = cochranQ > seriesCount - 1 && tau > 0;
   return [
     differ
@@ -69,5 +82,5 @@ function betweenSeries(statistics: StatisticsNumbersFragment): Statement[] {
   ];
 }
 
-/** A probability with two digits, or below the smallest worth telling. */
-export const probability = (p: number): string => (p < 0.001 ? '< 0.001' : formatShort(p, 2));
+/** A probability with its relation: `= 0.85`, or below the smallest worth telling. */
+export const probability = (p: number): string => (p < 0.001 ? '< 0.001' : `= ${formatShort(p, 2)}`);

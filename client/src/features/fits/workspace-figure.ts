@@ -182,7 +182,8 @@ function leftOutNames(series: readonly PairSeries[], { min, max }: Range): Mark[
         x: last.temperature,
         y: last.reduced,
         dx: right ? -10 : 9,
-        dy: -8,
+        // Above or below the line, where the series itself is.
+        dy: (last.deviation ?? 0) < 0 ? 13 : -8,
         wideOnly: true,
       },
     ];
@@ -254,6 +255,9 @@ function residualPanel({ series, temperatures }: Picture): PanelSpec {
   const carried = series.flatMap((one) =>
     one.points.flatMap((point) => (point.open || point.residual === null ? [] : [point.residual])),
   );
+  const leftOut = series.flatMap((one) =>
+    one.points.flatMap((point) => (point.open && point.residual !== null ? [point.residual] : [])),
+  );
   const marks: Mark[] = [
     { kind: 'band', tone: 'tint', x: [temperatures.min, temperatures.max], low: [-2, -2], high: [2, 2] },
     {
@@ -271,7 +275,7 @@ function residualPanel({ series, temperatures }: Picture): PanelSpec {
       points: one.points.flatMap((point) => (point.residual === null ? [] : [place(point, point.residual, null)])),
     })),
   ];
-  return { height: lowerHeight, y: aboutZero(deviationRange(carried, 2.6), words.residualAxis), marks };
+  return { height: lowerHeight, y: aboutZero(deviationRange(carried, 2.6, leftOut), words.residualAxis), marks };
 }
 
 const ROW = 19;

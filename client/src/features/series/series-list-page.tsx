@@ -1,10 +1,11 @@
 import { useQuery } from '@apollo/client/react';
 import { chakra } from '@chakra-ui/react';
+import { type ReactNode } from 'react';
 import { Link, useNavigate, useSearchParams } from 'react-router-dom';
 import { SeriesListDocument, type SeriesRowFragment, type SeriesStatus } from '../../gql/graphql';
 import { errorMessage } from '../../lib/apollo';
 import { fill } from '../../lib/fill';
-import { formatShort, formatShortDate } from '../../lib/format-quantity';
+import { formatNumber, formatShortDate } from '../../lib/format-quantity';
 import { pairTitle } from '../../lib/pair-title';
 import { paths } from '../../lib/paths';
 import { fromSi, type ReaderUnits, unitLabel, useReaderUnits } from '../../lib/units';
@@ -122,7 +123,7 @@ function List({ mine, state }: { readonly mine: boolean; readonly state: SeriesS
 
 function columnsOf(units: ReaderUnits): DataColumn<SeriesRowFragment>[] {
   const unit = unitLabel('temperature', units.temperature);
-  const kelvin = (value: number) => formatShort(fromSi('temperature', value, units.temperature), 4);
+  const kelvin = (value: number) => formatNumber(fromSi('temperature', value, units.temperature), 0);
   const lowest = ({ points }: SeriesRowFragment) => Math.min(...points.map(({ temperature }) => temperature));
   const highest = ({ points }: SeriesRowFragment) => Math.max(...points.map(({ temperature }) => temperature));
   return [
@@ -131,12 +132,13 @@ function columnsOf(units: ReaderUnits): DataColumn<SeriesRowFragment>[] {
       head: words.series,
       name: words.series,
       value: ({ title }) => title,
-      cell: ({ id, title, pair }) => (
+      cell: ({ id, title, pair, method }) => (
         <>
           <Link to={paths.series(id)}>{title}</Link>
-          <chakra.span display={{ base: 'block', md: 'none' }} color="ink2" fontSize="13px" lineHeight="18px">
-            {pairTitle(pair.substances)}
-          </chakra.span>
+          <Under>
+            <chakra.span hideFrom="md">{`${pairTitle(pair.substances)}, `}</chakra.span>
+            {method}
+          </Under>
         </>
       ),
     },
@@ -148,7 +150,6 @@ function columnsOf(units: ReaderUnits): DataColumn<SeriesRowFragment>[] {
       value: ({ pair }) => pairTitle(pair.substances),
       cell: ({ pair }) => <Link to={paths.pair(pair.id)}>{pairTitle(pair.substances)}</Link>,
     },
-    { id: 'method', head: words.method, name: words.method, wideOnly: true, value: ({ method }) => method },
     {
       id: 'n',
       head: <Typeset>{words.points}</Typeset>,
@@ -167,15 +168,18 @@ function columnsOf(units: ReaderUnits): DataColumn<SeriesRowFragment>[] {
       value: lowest,
       cell: (row) => `${kelvin(lowest(row))}–${kelvin(highest(row))}`,
     },
-    { id: 'by', head: words.by, name: words.by, wideOnly: true, value: ({ createdBy }) => createdBy?.name ?? null },
     {
       id: 'since',
       head: words.since,
       name: words.since,
-      numeric: true,
       wideOnly: true,
       value: ({ createdAt }) => createdAt,
-      cell: ({ createdAt }) => formatShortDate(createdAt),
+      cell: ({ createdAt, createdBy }) => (
+        <>
+          <chakra.span whiteSpace="nowrap">{formatShortDate(createdAt)}</chakra.span>
+          <Under>{createdBy?.name}</Under>
+        </>
+      ),
     },
     {
       id: 'state',
@@ -186,3 +190,10 @@ function columnsOf(units: ReaderUnits): DataColumn<SeriesRowFragment>[] {
     },
   ];
 }
+
+/** A second, smaller line of a cell. */
+const Under = ({ children }: { readonly children: ReactNode }) => (
+  <chakra.span display="block" color="ink2" fontSize="13px" lineHeight="18px">
+    {children}
+  </chakra.span>
+);

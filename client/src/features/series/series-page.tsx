@@ -103,17 +103,14 @@ function SeriesLeaf({ series }: { readonly series: SeriesDetailFragment }) {
 function WhyItCameBack({ series: { status, events } }: { readonly series: SeriesDetailFragment }) {
   const last = events.at(-1);
   if (last === undefined || (status !== 'RETURNED' && status !== 'RETIRED')) return null;
-  const values = { person: last.person.name, date: formatDate(last.at) };
+  const returned = status === 'RETURNED';
   return (
     <Banner
-      tone={status === 'RETURNED' ? 'warning' : 'ruled'}
-      mark={
-        <StateMark state={stateOf(status)}>
-          {fill(status === 'RETURNED' ? words.returnedBanner : words.retiredBanner, values)}
-        </StateMark>
-      }
+      tone={returned ? 'warning' : 'ruled'}
+      mark={<StateMark state={stateOf(status)}>{returned ? words.returnedBanner : words.retiredBanner}</StateMark>}
     >
-      {last.remark} {status === 'RETIRED' && words.retiredWords}
+      {fill(words.saidBy, { person: last.person.name, date: formatDate(last.at) })} {last.remark}{' '}
+      {!returned && words.retiredWords}
     </Banner>
   );
 }

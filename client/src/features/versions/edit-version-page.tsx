@@ -172,15 +172,8 @@ function WhyReturned({ version: { status, events } }: { readonly version: Edited
   const last = events.findLast(({ action }) => action === 'return');
   if (last === undefined || (status !== 'RETURNED' && events.at(-1)?.action !== 'change')) return null;
   return (
-    <Banner
-      tone="warning"
-      mark={
-        <StateMark state="returned">
-          {fill(words.returned, { person: last.person.name, date: formatDate(last.at) })}
-        </StateMark>
-      }
-    >
-      {last.remark}
+    <Banner tone="warning" mark={<StateMark state="returned">{words.returned}</StateMark>}>
+      {fill(words.saidBy, { person: last.person.name, date: formatDate(last.at) })} {last.remark}
     </Banner>
   );
 }

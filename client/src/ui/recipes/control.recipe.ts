@@ -97,7 +97,7 @@ export const fieldRecipe = defineSlotRecipe({
       minWidth: 0,
       paddingLeft: 0,
       fontSize: '15px',
-      lineHeight: '24px',
+      lineHeight: '28px',
       paddingBlock: '3px',
       _focusVisible: { outline: 'none' },
     },
@@ -120,7 +120,10 @@ export const fieldRecipe = defineSlotRecipe({
   variants: {
     size: {
       normal: {},
-      small: { control: { fontSize: '15px', lineHeight: '24px', padding: '1px 0' } },
+      small: {
+        control: { fontSize: '15px', lineHeight: '24px', padding: '1px 0' },
+        select: { lineHeight: '24px', paddingBlock: '1px' },
+      },
     },
     invalid: { true: { frame: { borderColor: 'warn' }, area: { borderColor: 'warn' } } },
   },
