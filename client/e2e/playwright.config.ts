@@ -5,8 +5,11 @@ import { defineConfig } from '@playwright/test';
 
 const ROOT = path.resolve(import.meta.dirname, '../..');
 const PORT = process.env['E2E_PORT'] ?? '4319';
+const given = process.env['E2E_DATA_DIR'];
 /** One folder for this run; the process of each worker reads the same name. */
 const DATA = (process.env['E2E_DATA_DIR'] ??= fs.mkdtempSync(path.join(os.tmpdir(), 'diffolio-e2e-')));
+// The process that made it outlives workers and service, and takes it away.
+if (given === undefined) process.on('exit', () => fs.rmSync(DATA, { recursive: true, force: true }));
 /** The first start makes a cluster and seeds the demo, beside whatever else a busy machine does. */
 const START_MS = 300_000;
 
@@ -26,7 +29,7 @@ export default defineConfig({
   testDir: '.',
   outputDir: path.join(ROOT, 'test-results'),
   workers: 1,
-  timeout: 240_000,
+  timeout: 360_000,
   expect: { timeout: 30_000 },
   forbidOnly: true,
   use: {
