@@ -2,7 +2,7 @@ import { useQuery } from '@apollo/client/react';
 import { chakra } from '@chakra-ui/react';
 import { useMemo } from 'react';
 import { Link } from 'react-router-dom';
-import { FitDetailDocument, type FitDetailQuery } from '../../gql/graphql';
+import { FitDetailDocument } from '../../gql/graphql';
 import { errorMessage } from '../../lib/apollo';
 import { counted } from '../../lib/counted';
 import { fill } from '../../lib/fill';
@@ -20,6 +20,7 @@ import { MarginBlock } from '../../ui/page/margin-block';
 import { Page } from '../../ui/page/page';
 import { Opening, Section } from '../../ui/page/section';
 import { choiceOfFit } from './choice';
+import { type DetailedFit } from './detailed-fit';
 import { FitSeriesSection } from './fit-series-section';
 import { pairSeries, type PairSeries } from './pair-series';
 import { ParametersSection } from './parameters-section';
@@ -31,7 +32,6 @@ import { Statements } from './warnings';
 
 const words = fitStrings.fitPage;
 const pairs = { name: fitStrings.path.pairs, to: paths.pairs() };
-export type DetailedFit = NonNullable<FitDetailQuery['fit']>;
 
 /** One kept fit: what it is, whether it can carry a sheet, and what it was made from. */
 export function FitPage({ id }: { readonly id: string }) {

@@ -10,7 +10,7 @@ import { Typeset } from '../../ui/numbers/typeset';
 import { Section } from '../../ui/page/section';
 import { ledgerRecipe } from '../../ui/recipes/table.recipe';
 import { DataTable, type DataColumn } from '../../ui/table/data-table';
-import { type DetailedFit } from './fit-page';
+import { type DetailedFit } from './detailed-fit';
 import { type PairPoint, type PairSeries } from './pair-series';
 import { parseReason } from './reasons';
 

@@ -10,7 +10,7 @@ import { Typeset } from '../../ui/numbers/typeset';
 import { MarginBlock } from '../../ui/page/margin-block';
 import { Section } from '../../ui/page/section';
 import { DataTable, type DataColumn } from '../../ui/table/data-table';
-import { type DetailedFit } from './fit-page';
+import { type DetailedFit } from './detailed-fit';
 import { ParameterSymbol, quantityOf } from './parameter';
 import { TauSlope } from './result-block';
 import { deviationText } from './small-number';

@@ -18,7 +18,7 @@ import { Fading, ResultBlock } from './result-block';
 import { asSentence, doubt } from './statements';
 import { type Preview } from './use-preview';
 import { MarginStatements } from './warnings';
-import { type Pair } from './workspace-page';
+import { type Pair } from './workspace-pair';
 
 const words = fitStrings.recipe;
 

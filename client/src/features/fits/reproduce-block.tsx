@@ -7,7 +7,7 @@ import { Actions, Button } from '../../ui/form/button';
 import { TickMark, WarnMark } from '../../ui/marks/marks';
 import { MarginBlock } from '../../ui/page/margin-block';
 import { choiceOfFit, fitInput } from './choice';
-import { type DetailedFit } from './fit-page';
+import { type DetailedFit } from './detailed-fit';
 import { compareParameters } from './reproduction';
 
 const words = fitStrings.fitPage;

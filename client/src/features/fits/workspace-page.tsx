@@ -1,6 +1,6 @@
 import { useQuery } from '@apollo/client/react';
 import { useMemo } from 'react';
-import { PairEstimatesDocument, WorkspaceDocument, type WorkspaceQuery } from '../../gql/graphql';
+import { PairEstimatesDocument, WorkspaceDocument } from '../../gql/graphql';
 import { errorMessage } from '../../lib/apollo';
 import { counted } from '../../lib/counted';
 import { fill } from '../../lib/fill';
@@ -25,9 +25,9 @@ import { useChoice } from './use-choice';
 import { usePreview, type Preview } from './use-preview';
 import { WaitingSeries } from './waiting-series';
 import { type Curve, type EstimateLine } from './workspace-figure';
+import { type Pair } from './workspace-pair';
 
 const pairs = { name: fitStrings.path.pairs, to: paths.pairs() };
-export type Pair = NonNullable<WorkspaceQuery['pairById']>;
 
 /** The workspace of a pair: see, leave out, fit, keep. */
 export function WorkspacePage({ id }: { readonly id: string }) {
