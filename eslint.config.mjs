@@ -8,7 +8,7 @@ export default tseslint.config(
   { ignores: ['**/node_modules/', '**/dist/', '.data/', 'client/src/gql/', '**/test-results/', '**/coverage/'] },
   js.configs.recommended,
   {
-    files: ['**/*.mjs'],
+    files: ['**/*.{mjs,cjs}'],
     languageOptions: { globals: globals.node },
   },
   {
