@@ -173,7 +173,12 @@ function Cell({ row, column, index, places, issue, units }: CellProps) {
       <chakra.td css={[styles.pasted, tint]} data-part="pasted">
         {brought}
       </chakra.td>
-      <chakra.td css={[styles.understood, tint]} {...(isOpen ? { 'data-open': '' } : {})} {...described}>
+      <chakra.td
+        css={[styles.understood, tint]}
+        data-part="understood"
+        {...(isOpen ? { 'data-open': '' } : {})}
+        {...described}
+      >
         {isOpen ? '?' : row.point && <Aligned places={places}>{cellText(shown, row.point, units, places)}</Aligned>}
         <Marks numbers={issue === undefined ? [] : [issue.number]} />
       </chakra.td>
@@ -246,6 +251,8 @@ const GRID = {
   },
   '& thead th': { verticalAlign: 'top', paddingLeft: '12px', position: 'relative' },
   '& td:not(:first-of-type):not(.n)': { paddingLeft: '12px' },
+  // Room for the number of a doubt behind the digits.
+  '&& td[data-part=understood]': { paddingLeft: '0', paddingRight: '15px' },
   '& .row': { color: 'ink2', fontSize: '13px', position: 'relative', paddingRight: '18px' },
   // The number of a row stands before it, its bracket behind.
   '& .row > span': { right: 'auto', left: 0 },
