@@ -49,9 +49,15 @@ export class FilesService {
 
   /** A file the viewer may see: their own, and those of series that are open to the group. */
   async find(id: string, viewer: Viewer): Promise<StoredUpload> {
-    const file = isId(id) ? await this.dataSource.getRepository(StoredUpload).findOneBy({ id }) : null;
-    if (!file || !(await this.maySee(file, viewer))) throw new ApiError('NOT_FOUND', 'There is no such file.');
+    const file = isId(id) ? await this.findVisible(id, viewer) : null;
+    if (!file) throw new ApiError('NOT_FOUND', 'There is no such file.');
     return file;
+  }
+
+  /** The file, or null when there is none the viewer may see. */
+  async findVisible(id: string, viewer: Viewer): Promise<StoredUpload | null> {
+    const file = await this.dataSource.getRepository(StoredUpload).findOneBy({ id });
+    return file && (await this.maySee(file, viewer)) ? file : null;
   }
 
   async open(file: StoredUpload): Promise<Readable> {

@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { FilesModule } from '../files/files.module.js';
 import { MailModule } from '../mail/mail.module.js';
 import { PairsModule } from '../pairs/pairs.module.js';
 import { PeopleModule } from '../people/people.module.js';
@@ -7,7 +8,7 @@ import { PairSeriesResolver, SeriesEventsResolver, SeriesResolver } from './seri
 import { SeriesService } from './series.service.js';
 
 @Module({
-  imports: [MailModule, PairsModule, PeopleModule],
+  imports: [FilesModule, MailModule, PairsModule, PeopleModule],
   providers: [SeriesService, SeriesPointsStore, SeriesResolver, SeriesEventsResolver, PairSeriesResolver],
   exports: [SeriesService, SeriesPointsStore],
 })

@@ -3,6 +3,8 @@ import { AnyoneMay, RolesMay, SignedInMay } from '../common/access.decorators.js
 import { type Connection, connectionOf, pageOf, toConnection } from '../common/graphql/connection.js';
 import { loaderFor } from '../common/graphql/loader-for.js';
 import { CurrentViewer, isOfTheGroup, type Viewer } from '../common/viewer.js';
+import { StoredUpload } from '../files/file.entity.js';
+import { FilesService } from '../files/files.service.js';
 import { GasPair } from '../pairs/gas-pair.entity.js';
 import { PairsService } from '../pairs/pairs.service.js';
 import { PeopleService } from '../people/people.service.js';
@@ -22,6 +24,7 @@ export class SeriesResolver {
     private readonly pointsStore: SeriesPointsStore,
     private readonly pairs: PairsService,
     private readonly people: PeopleService,
+    private readonly files: FilesService,
   ) {}
 
   @Query(() => Series, { nullable: true, description: 'One series; null when there is none the caller may see.' })
@@ -67,6 +70,14 @@ export class SeriesResolver {
   @ResolveField(() => [SeriesPoint])
   points(@Parent() series: Series, @Context() context: object): Promise<SeriesPoint[]> {
     return loaderFor(context, this.pointsStore.bySeries).load(series.id);
+  }
+
+  @ResolveField(() => StoredUpload, {
+    nullable: true,
+    description: 'The file it was read from; null where there is none the caller may see.',
+  })
+  async file(@Parent() series: Series, @CurrentViewer() viewer: Viewer | null): Promise<StoredUpload | null> {
+    return series.fileId && viewer ? this.files.findVisible(series.fileId, viewer) : null;
   }
 
   @ResolveField(() => Int, {

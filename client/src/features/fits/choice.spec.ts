@@ -5,6 +5,7 @@ import { usualRecipe } from './recipe';
 
 const series = (id: string, more: Partial<FitSeriesFragment> = {}): FitSeriesFragment => ({
   id,
+  ordinal: 0,
   title: `Laboratory ${id}`,
   status: 'ACCEPTED',
   source: 'notebook',

@@ -70,10 +70,10 @@ const SHOWN = ['ACCEPTED', 'SUBMITTED'];
 export function pairSeries(sources: Sources): PairSeries[] {
   const { only } = sources;
   const isShown = ({ id, status }: FitSeriesFragment) => (only ? only.has(id) : SHOWN.includes(status));
-  return sources.series.flatMap((series, place) => (isShown(series) ? [oneSeries(series, place, sources)] : []));
+  return sources.series.flatMap((series) => (isShown(series) ? [oneSeries(series, sources)] : []));
 }
 
-function oneSeries(series: FitSeriesFragment, place: number, sources: Sources): PairSeries {
+function oneSeries(series: FitSeriesFragment, sources: Sources): PairSeries {
   const { choice, analysis } = sources;
   const isAccepted = series.status === 'ACCEPTED' || sources.only !== undefined;
   const found = isAccepted ? analysis?.series.find(({ seriesId }) => seriesId === series.id) : undefined;
@@ -83,8 +83,8 @@ function oneSeries(series: FitSeriesFragment, place: number, sources: Sources): 
   const points = series.points.map((_, i) => onePoint(series, i, found, carriesWeight, sources));
   return {
     id: series.id,
-    letter: seriesLetter(place),
-    mark: place,
+    letter: seriesLetter(series.ordinal),
+    mark: series.ordinal,
     title: series.title,
     status: series.status,
     method: series.method,

@@ -19,6 +19,8 @@ const point = {
 
 const series: SeriesDetailFragment = {
   id: 's1',
+  ordinal: 0,
+  file: null,
   title: 'Laboratory A',
   status: 'RETURNED',
   source: 'notebook 4',

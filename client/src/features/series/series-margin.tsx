@@ -1,12 +1,18 @@
 import { chakra } from '@chakra-ui/react';
+import { useMutation } from '@tanstack/react-query';
 import { Link } from 'react-router-dom';
 import { type SeriesDetailFragment } from '../../gql/graphql';
+import { downloadFile } from '../../lib/download';
 import { formatDate, formatShort, formatShortDate, withUnit } from '../../lib/format-quantity';
 import { paths } from '../../lib/paths';
 import { seriesStrings } from '../../strings/series';
 import { StateMark, stateOf } from '../../ui/marks/state-mark';
 import { Typeset } from '../../ui/numbers/typeset';
+import { WordButton } from '../../ui/form/button';
 import { MarginBlock } from '../../ui/page/margin-block';
+
+/** Enough to tell two files apart at a glance. */
+const SHA_DIGITS = 16;
 
 const words = seriesStrings.margin;
 interface Props {
@@ -50,9 +56,22 @@ export const ProvenanceBlock = ({ series }: Props) => (
           </Link>
         ),
       ],
+      [words.file, series.file ? <OriginalFile key="file" file={series.file} /> : words.noFile],
+      [words.sha, series.file?.sha256.slice(0, SHA_DIGITS)],
     ]}
   />
 );
+
+/** Saves the file the series was read from, as it was brought. */
+function OriginalFile({ file: { id, name } }: { readonly file: NonNullable<SeriesDetailFragment['file']> }) {
+  const download = useMutation({ mutationFn: () => downloadFile(`/api/files/${id}`, name) });
+  return (
+    <>
+      <WordButton onClick={() => download.mutate()}>{words.download.replace('{name}', () => name)}</WordButton>
+      {download.isError && <chakra.span role="alert">{` ${words.fileFailed}`}</chakra.span>}
+    </>
+  );
+}
 
 /** Who did what, newest first. */
 export function HistoryBlock({ series: { events } }: Props) {

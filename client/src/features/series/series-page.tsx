@@ -121,11 +121,9 @@ function PictureSection({ series, title }: { readonly series: SeriesDetailFragme
   const variables = { pairId: series.pair.id, temperatures, pressure: REFERENCE_PRESSURE };
   const { data } = useQuery(SeriesSurroundingsDocument, series.points.length === 0 ? skipToken : { variables });
   const estimates = useMemo(() => data?.pairById?.estimates ?? [], [data]);
-  // The same colour and shape as in the workspace: the place among all series of the pair.
-  const mark = Math.max(0, data?.pairById?.series.edges.findIndex(({ node }) => node.id === series.id) ?? 0);
   const spec = useMemo(
-    () => seriesFigure(series.points, mark, temperatures, estimates, units),
-    [series.points, mark, temperatures, estimates, units],
+    () => seriesFigure(series.points, series.ordinal, temperatures, estimates, units),
+    [series.points, series.ordinal, temperatures, estimates, units],
   );
   const temperature = unitLabel('temperature', units.temperature);
   const diffusivity = unitLabel('diffusivity', units.diffusivity);
