@@ -3,7 +3,6 @@ import { ReleaseArchiveService } from '../src/releases/release-archive.service.j
 import {
   ACCEPT_SERIES,
   acceptedSeries,
-  approved,
   type Crew,
   CREATE_SERIES,
   crewOf,
@@ -17,7 +16,6 @@ import {
   type Made,
   PASSWORD,
   pointsOf,
-  RELEASE,
   RETURN_SERIES,
   REVIEW,
   SERIES_INPUT,
@@ -28,7 +26,17 @@ import {
   UPDATE_SERIES,
   WITHDRAW,
 } from './actors.js';
-import { aftermathOf, overlapping, releasedNumbers, together, WON } from './races.js';
+import {
+  aftermathOf,
+  approvedVersion,
+  fitOf,
+  overlapping,
+  releasedNumbers,
+  releasing,
+  returning,
+  together,
+  WON,
+} from './races.js';
 
 const ROUNDS = [1, 2, 3, 4, 5];
 const ONE_WINNER = ['CONFLICT', WON];
@@ -44,8 +52,7 @@ describe('of two who act at once', () => {
     // The printing of each release has its own test; here it would only slow the races down.
     const archive = group.server.app.get(ReleaseArchiveService, { strict: false });
     jest.spyOn(archive, 'archivePdf').mockResolvedValue(undefined);
-    const series = await acceptedSeries(crew);
-    fitId = (await fitted(crew.editor, series['pair'].id))['id'];
+    fitId = await fitOf(crew, 'helium');
   });
   afterAll(() => group.stop());
 
@@ -56,21 +63,11 @@ describe('of two who act at once', () => {
       input: { versionId: version['id'], lockVersion: version['lockVersion'], summary, changeNote: 'Invented.' },
     },
   });
-  const release = (version: Made) => ({
-    actor: crew.reviewer,
-    mutation: RELEASE,
-    variables: { id: version['id'], password: PASSWORD },
-  });
-  const giveBack = (version: Made) => ({
-    actor: crew.reviewer,
-    mutation: REVIEW,
-    variables: { input: { versionId: version['id'], verdict: 'RETURN', remark: 'Not yet.' } },
-  });
   const versionRow = (version: Made) => ({ table: 'data_sheet_versions', id: version['id'] as string });
 
   it.each(ROUNDS)('one edits a draft version and the other hears CONFLICT (round %i)', async () => {
     const draft = await drafted(crew.editor, fitId);
-    const outcomes = await overlapping(versionRow(draft), edit(draft, 'first'), edit(draft, 'second'));
+    const outcomes = await overlapping(versionRow(draft['id']), edit(draft, 'first'), edit(draft, 'second'));
     expect([...outcomes].sort()).toEqual(ONE_WINNER);
     const [row] = await group.server.sql<{ summary: string; lock_version: number }>(
       'SELECT summary, lock_version FROM data_sheet_versions WHERE id = $1',
@@ -129,19 +126,19 @@ describe('of two who act at once', () => {
   it('one hands a version in for review and the other hears CONFLICT', async () => {
     const draft = await drafted(crew.editor, fitId);
     const submit = { actor: crew.editor, mutation: SUBMIT_VERSION, variables: { id: draft['id'] } };
-    expect((await overlapping(versionRow(draft), submit, submit)).sort()).toEqual(ONE_WINNER);
+    expect((await overlapping(versionRow(draft['id']), submit, submit)).sort()).toEqual(ONE_WINNER);
   });
 
   it('one reviews a version and the other hears CONFLICT', async () => {
-    const version = await inReview(crew.editor, fitId);
+    const version: string = (await inReview(crew.editor, fitId))['id'];
     const approve = {
       actor: crew.reviewer,
       mutation: REVIEW,
-      variables: { input: { versionId: version['id'], verdict: 'APPROVE', remark: '' } },
+      variables: { input: { versionId: version, verdict: 'APPROVE', remark: '' } },
     };
-    expect((await overlapping(versionRow(version), approve, giveBack(version))).sort()).toEqual(ONE_WINNER);
+    expect((await overlapping(versionRow(version), approve, returning(crew, version))).sort()).toEqual(ONE_WINNER);
     const [row] = await group.server.sql<{ count: number }>('SELECT count(*)::int FROM reviews WHERE version_id = $1', [
-      version['id'],
+      version,
     ]);
     expect(row!.count).toBe(1);
   });
@@ -153,8 +150,8 @@ describe('of two who act at once', () => {
     });
 
     it.each(ROUNDS)('and the other hears CONFLICT (round %i)', async () => {
-      const version = await approved(crew, fitId);
-      const outcomes = await overlapping(versionRow(version), release(version), release(version));
+      const version = await approvedVersion(crew, fitId);
+      const outcomes = await overlapping(versionRow(version), releasing(crew, version), releasing(crew, version));
       expect([...outcomes].sort()).toEqual(ONE_WINNER);
       expect(await aftermathOf(crew.editor, version)).toEqual({
         status: 'RELEASED',
@@ -166,8 +163,8 @@ describe('of two who act at once', () => {
     });
 
     it.each(ROUNDS)('or the other returns, with nothing half done (round %i)', async () => {
-      const version = await approved(crew, fitId);
-      const outcomes = await overlapping(versionRow(version), release(version), giveBack(version));
+      const version = await approvedVersion(crew, fitId);
+      const outcomes = await overlapping(versionRow(version), releasing(crew, version), returning(crew, version));
       expect([...outcomes].sort()).toEqual(ONE_WINNER);
       const isReleased = outcomes[0] === WON;
       expect(await aftermathOf(crew.editor, version)).toEqual({
@@ -179,12 +176,16 @@ describe('of two who act at once', () => {
     });
 
     it.each(ROUNDS)('one of two approved versions of a sheet, and the other goes back (round %i)', async () => {
-      const versions = [await approved(crew, fitId), await approved(crew, fitId)];
-      const outcomes = await overlapping(versionRow(versions[0]), release(versions[0]), release(versions[1]));
+      const versions = [await approvedVersion(crew, fitId), await approvedVersion(crew, fitId)] as const;
+      const outcomes = await overlapping(
+        versionRow(versions[0]),
+        releasing(crew, versions[0]),
+        releasing(crew, versions[1]),
+      );
       expect([...outcomes].sort()).toEqual(ONE_WINNER);
-      const winner = outcomes.indexOf(WON);
-      expect(await aftermathOf(crew.editor, versions[winner])).toMatchObject({ status: 'RELEASED', current: 1 });
-      expect(await aftermathOf(crew.editor, versions[1 - winner])).toMatchObject({ status: 'RETURNED', releases: 0 });
+      const [won, lost] = outcomes[0] === WON ? versions : [versions[1], versions[0]];
+      expect(await aftermathOf(crew.editor, won)).toMatchObject({ status: 'RELEASED', current: 1 });
+      expect(await aftermathOf(crew.editor, lost)).toMatchObject({ status: 'RETURNED', releases: 0 });
       expect(await releasedNumbers(crew.editor)).toEqual([...numbersBefore, `1.${numbersBefore.length}`]);
     });
 
@@ -192,13 +193,13 @@ describe('of two who act at once', () => {
       const [current] = await group.server.sql<{ id: string }>(
         `SELECT id FROM data_sheet_versions WHERE status = 'RELEASED'`,
       );
-      const version = await approved(crew, fitId);
+      const version = await approvedVersion(crew, fitId);
       const withdraw = {
         actor: crew.editor,
         mutation: WITHDRAW,
         variables: { id: current!.id, reason: 'Invented.', password: PASSWORD },
       };
-      const outcomes = await together(release(version), withdraw);
+      const outcomes = await together(releasing(crew, version), withdraw);
       // Whether withdrawn first or superseded first, there is one current version after.
       expect(outcomes[0]).toBe(WON);
       expect(ONE_WINNER).toContain(outcomes[1]);

@@ -1,5 +1,5 @@
 import { codeOf } from './running-server.js';
-import { type Actor, type Made } from './actors.js';
+import { acceptedSeries, type Actor, approved, type Crew, fitted, PASSWORD, RELEASE, REVIEW } from './actors.js';
 
 /** One of several acts that are tried at the same time. */
 export interface Act {
@@ -50,6 +50,28 @@ export async function overlapping(row: { table: string; id: string }, ...acts: A
   return outcomes;
 }
 
+/** @returns the id of a fit to an accepted series of argon with another gas */
+export async function fitOf(crew: Crew, gas: string): Promise<string> {
+  const series = await acceptedSeries(crew, { b: { name: gas } });
+  return (await fitted(crew.editor, series['pair'].id))['id'];
+}
+
+/** @returns the id of a version that may be released */
+export const approvedVersion = async (crew: Crew, fitId: string): Promise<string> =>
+  (await approved(crew, fitId))['id'];
+
+export const releasing = ({ reviewer }: Crew, id: string): Act => ({
+  actor: reviewer,
+  mutation: RELEASE,
+  variables: { id, password: PASSWORD },
+});
+
+export const returning = ({ reviewer }: Crew, versionId: string): Act => ({
+  actor: reviewer,
+  mutation: REVIEW,
+  variables: { input: { versionId, verdict: 'RETURN', remark: 'Not yet.' } },
+});
+
 /** What is left of a sheet's releases after a race. */
 export interface Aftermath {
   readonly status: string;
@@ -59,7 +81,7 @@ export interface Aftermath {
 }
 
 /** How a version stands, the releases of it, the current versions of its sheet, and the DOIs sent for registration. */
-export async function aftermathOf(actor: Actor, version: Made): Promise<Aftermath> {
+export async function aftermathOf(actor: Actor, versionId: string): Promise<Aftermath> {
   const [row] = await actor.server.sql<Aftermath>(
     `SELECT v.status,
        (SELECT count(*) FROM releases r WHERE r.version_id = v.id)::int AS releases,
@@ -68,7 +90,7 @@ export async function aftermathOf(actor: Actor, version: Made): Promise<Aftermat
        (SELECT count(*) FROM pgboss.job j
          WHERE j.name = 'doi.register' AND j.data ->> 'versionId' = v.id::text)::int AS registrations
      FROM data_sheet_versions v WHERE v.id = $1`,
-    [version['id']],
+    [versionId],
   );
   return row!;
 }

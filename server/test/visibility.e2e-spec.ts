@@ -76,7 +76,7 @@ describe('who sees what', () => {
   const sheets: Record<string, Made> = {};
 
   const asks = async (viewer: ViewerName, query: string, variables: object = {}) =>
-    (await viewers[viewer].ask(query, variables));
+    await viewers[viewer].ask(query, variables);
   const codeOf = async (version: Made) =>
     (
       await group.server.sql<{ id: string; code: string; pair: string }>(
