@@ -9,6 +9,8 @@ import { startPostgres } from './postgres.mjs';
 import { launch, LaunchError, ROOT, runAloud, say } from './shell.mjs';
 
 const bin = (name) => path.join(ROOT, 'node_modules/.bin', name);
+/** What must be stopped before this process leaves. */
+const leaving = [];
 const readJson = (file) => (fs.existsSync(file) ? JSON.parse(fs.readFileSync(file, 'utf8')) : null);
 
 /** A check passes or fails as one. */
@@ -51,11 +53,14 @@ async function codegen() {
 
 async function server(scratch, args) {
   const file = path.join(scratch, 'jest.json');
+  const postgres = await startPostgres(path.join(scratch, 'data'), { durable: false });
+  leaving.push(postgres.stop);
   const { code } = await runAloud(bin('jest'), ['--json', `--outputFile=${file}`, ...args], {
     cwd: path.join(ROOT, 'server'),
     env: {
       ...process.env,
       NODE_ENV: 'test',
+      TEST_DATABASE_SERVER: postgres.url('postgres'),
       NODE_OPTIONS: '--experimental-vm-modules --disable-warning=ExperimentalWarning',
     },
   });
@@ -115,17 +120,14 @@ await launch(async () => {
   installPackages();
   const scratch = fs.mkdtempSync(path.join(os.tmpdir(), 'diffolio-test-'));
   fs.chmodSync(scratch, 0o711);
-  let postgres = null;
   const clear = async () => {
-    await postgres?.stop();
+    for (const stop of leaving) await stop();
     fs.rmSync(scratch, { recursive: true, force: true });
   };
   for (const signal of ['SIGINT', 'SIGTERM']) process.on(signal, () => void clear().then(() => process.exit(130)));
 
   const results = [];
   try {
-    postgres = await startPostgres(path.join(scratch, 'data'), { durable: false });
-    process.env.TEST_DATABASE_SERVER = postgres.url('postgres');
     for (const [name, part] of Object.entries(PARTS)) {
       if (only && name !== only) continue;
       say(`\n── ${name} ──`);
