@@ -6,6 +6,13 @@ export const sheetStrings = {
   noCurrent: 'No version of this sheet is in force. These versions stay readable:',
   failed: 'The sheet could not be loaded.',
 
+  follow: {
+    title: 'When it changes',
+    followed: 'You get a letter when a version of this sheet is released or withdrawn.',
+    notFollowed: 'A letter can tell you when a version of this sheet is released or withdrawn.',
+    follow: 'Follow this sheet',
+    unfollow: 'Follow it no longer',
+  },
   margin: {
     state: 'State',
     from: 'Where it came from',

@@ -11,6 +11,7 @@ import { MarginBlock } from '../../ui/page/margin-block';
 import { Section } from '../../ui/page/section';
 import { Evaluator } from './evaluator';
 import { Paragraphs } from './paragraphs';
+import { FollowBlock } from './follow-block';
 import { DownloadsBlock, IdentityBlock, WorkBlock } from './sheet-margin';
 import { sheetStrings } from '../../strings/sheets';
 
@@ -40,6 +41,7 @@ export function CorrelationSection({ number, title, version, code, pairId }: Cor
           <DownloadsBlock version={version} code={code} />
           <IdentityBlock version={version} />
           <WorkBlock version={version} code={code} pairId={pairId} />
+          <FollowBlock sheetId={version.sheet.id} />
         </>
       }
     >
