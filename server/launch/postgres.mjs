@@ -16,8 +16,12 @@ function findBinaries() {
   return version ? `${DEBIAN_BASE}/${version}/bin` : null;
 }
 
-/** Folder of PostgreSQL's programs; installs Debian's package when root, without Debian's own cluster. */
-function requireBinaries() {
+/**
+ * Folder of PostgreSQL's programs; installs Debian's package when root, without Debian's own cluster.
+ *
+ * @throws {LaunchError} saying the command that installs it, when not root
+ */
+export function requirePostgres() {
   const found = findBinaries();
   if (found) return found;
   if (isRoot()) {
@@ -150,7 +154,7 @@ async function clearEarlierRun(cluster) {
  * @throws {LaunchError} when PostgreSQL is missing and cannot be installed, or does not start
  */
 export async function startPostgres(dataFolder, { durable = true } = {}) {
-  const bin = requireBinaries();
+  const bin = requirePostgres();
   const user = unprivilegedUser();
   const cluster = clusterFolder(dataFolder, user);
   const env = { PATH: process.env.PATH, LC_ALL: 'C.UTF-8', HOME: '/' };

@@ -2,7 +2,7 @@
 import { spawn } from 'node:child_process';
 import path from 'node:path';
 import { buildClient, buildServer, installPackages } from './install.mjs';
-import { freePort, startPostgres } from './postgres.mjs';
+import { freePort, requirePostgres, startPostgres } from './postgres.mjs';
 import { launch, LaunchError, ROOT, say } from './shell.mjs';
 
 const SERVER_STOP_TIMEOUT_MS = 6_000;
@@ -50,6 +50,8 @@ await launch(async () => {
   // Registered before anything starts, so that an early signal leaves nothing behind; a repeated one is harmless.
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void leave(0));
 
+  // What only somebody else can mend is said first, before minutes are spent on the rest.
+  if (!process.env.DATABASE_URL) requirePostgres();
   installPackages();
   buildServer();
   buildClient();

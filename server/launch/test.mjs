@@ -5,7 +5,7 @@ import os from 'node:os';
 import path from 'node:path';
 import { requireBrowserTools } from './chromium.mjs';
 import { buildClient, buildServer, installPackages } from './install.mjs';
-import { startPostgres } from './postgres.mjs';
+import { requirePostgres, startPostgres } from './postgres.mjs';
 import { launch, LaunchError, ROOT, runAloud, say } from './shell.mjs';
 
 const bin = (name) => path.join(ROOT, 'node_modules/.bin', name);
@@ -117,6 +117,7 @@ await launch(async () => {
   const [only, ...rest] = process.argv.slice(2);
   if (only && !(only in PARTS))
     throw new LaunchError(`There is no part "${only}"; there are ${Object.keys(PARTS).join(', ')}.`);
+  if (!only || only === 'server' || only === 'browser') requirePostgres();
   installPackages();
   const scratch = fs.mkdtempSync(path.join(os.tmpdir(), 'diffolio-test-'));
   fs.chmodSync(scratch, 0o711);
