@@ -63,7 +63,7 @@ describe('of two who act at once', () => {
       input: { versionId: version['id'], lockVersion: version['lockVersion'], summary, changeNote: 'Invented.' },
     },
   });
-  const versionRow = (version: Made) => ({ table: 'data_sheet_versions', id: version['id'] as string });
+  const versionRow = (id: string) => ({ table: 'data_sheet_versions', id });
 
   it.each(ROUNDS)('one edits a draft version and the other hears CONFLICT (round %i)', async () => {
     const draft = await drafted(crew.editor, fitId);
