@@ -11,6 +11,7 @@ import { estimatesOf } from '../fits/pair-estimates.js';
 import { seriesOffset } from '../numerics/fitting/series-offsets.js';
 import { GasPair } from '../pairs/gas-pair.entity.js';
 import { Person } from '../people/person.entity.js';
+import { approvalsInForce } from '../reviews/review-rules.js';
 import { Review } from '../reviews/review.entity.js';
 import { Series, type SeriesPoint } from '../series/series.entity.js';
 import {
@@ -161,19 +162,20 @@ export class SheetFactsService {
     release: Release | null,
   ): Promise<SheetFacts['people']> {
     const reviews = await manager.find(Review, {
-      where: { versionId: version.id, verdict: 'APPROVE' },
-      order: { createdAt: 'ASC' },
+      where: { versionId: version.id },
+      order: { createdAt: 'ASC', id: 'ASC' },
     });
+    const approvals = approvalsInForce(reviews);
     const ids = [
       version.preparedById,
-      ...reviews.map((review) => review.reviewerId),
+      ...approvals.map((review) => review.reviewerId),
       ...(release ? [release.releasedById] : []),
     ];
     const people = await manager.findBy(Person, { id: In(ids) });
     const nameOf = (id: string) => people.find((person) => person.id === id)?.name ?? '';
     return {
       preparedBy: nameOf(version.preparedById),
-      reviewedBy: [...new Set(reviews.map((review) => nameOf(review.reviewerId)))],
+      reviewedBy: [...new Set(approvals.map((review) => nameOf(review.reviewerId)))],
       releasedBy: release && nameOf(release.releasedById),
     };
   }

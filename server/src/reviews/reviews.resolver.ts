@@ -20,6 +20,7 @@ import { DataSheetVersionPayload, toVersionPayload } from '../data-sheets/data-s
 import { PeopleService } from '../people/people.service.js';
 import { Person } from '../people/person.entity.js';
 import { REVIEW_QUESTIONS } from './review-checklist.js';
+import { approvalsInForce } from './review-rules.js';
 import { Review, ReviewVerdict } from './review.entity.js';
 import { ReviewsService } from './reviews.service.js';
 
@@ -104,9 +105,7 @@ export class VersionReviewsResolver {
   @ResolveField(() => [Person])
   async reviewedBy(@Parent() version: DataSheetVersion, @Context() context: object): Promise<Person[]> {
     const reviews = await loaderFor(context, this.reviewsService.byVersions).load(version.id);
-    const ids = [
-      ...new Set(reviews.filter((review) => review.verdict === 'APPROVE').map((review) => review.reviewerId)),
-    ];
+    const ids = [...new Set(approvalsInForce(reviews).map((review) => review.reviewerId))];
     const loader = loaderFor(context, this.people.byIds);
     return Promise.all(ids.map((id) => loader.load(id)));
   }

@@ -278,6 +278,13 @@ const GUARDS = `
   CREATE TRIGGER series_events_immutable BEFORE UPDATE OR DELETE ON series_events FOR EACH ROW EXECUTE FUNCTION refuse_change();
   CREATE TRIGGER version_events_immutable BEFORE UPDATE OR DELETE ON version_events FOR EACH ROW EXECUTE FUNCTION refuse_change();
 
+  CREATE TRIGGER fits_not_truncated BEFORE TRUNCATE ON fits EXECUTE FUNCTION refuse_change();
+  CREATE TRIGGER fit_series_not_truncated BEFORE TRUNCATE ON fit_series EXECUTE FUNCTION refuse_change();
+  CREATE TRIGGER reviews_not_truncated BEFORE TRUNCATE ON reviews EXECUTE FUNCTION refuse_change();
+  CREATE TRIGGER series_events_not_truncated BEFORE TRUNCATE ON series_events EXECUTE FUNCTION refuse_change();
+  CREATE TRIGGER version_events_not_truncated BEFORE TRUNCATE ON version_events EXECUTE FUNCTION refuse_change();
+  CREATE TRIGGER series_points_not_truncated BEFORE TRUNCATE ON series_points EXECUTE FUNCTION refuse_change();
+
   -- Releases form one chain without gaps: each names the hash of the one before it.
   CREATE FUNCTION check_release_chain() RETURNS trigger LANGUAGE plpgsql AS $$
   BEGIN
